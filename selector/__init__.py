@@ -1,0 +1,3 @@
+"""Exact short lists of current-sense designs from stocked parts."""
+
+__version__ = "0.1.0"
