@@ -1,0 +1,27 @@
+"""Each range ends above the one below it and has a smaller gain."""
+
+from __future__ import annotations
+
+from selector.candidate import Operating
+from selector.limits.measure import Limit, LinkCheck, Measure
+from selector.units import CURRENT
+
+
+def _borders(at: Operating) -> Measure:
+    """The border below lies below this range's own, strictly."""
+    return Measure(at.border.below_a, at.high_a, strict=True)
+
+
+def _gains(at: Operating) -> Measure:
+    """The gain is below that of the range below, strictly."""
+    return Measure(at.gain, at.border.below_gain, strict=True)
+
+
+LIMIT = Limit(
+    "range order",
+    (
+        LinkCheck(_borders),
+        LinkCheck(_gains),
+    ),
+    CURRENT,
+)

@@ -1,0 +1,1 @@
+"""Formulas of noise, heat and filters; floats and arrays alike, SI units."""

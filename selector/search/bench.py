@@ -1,0 +1,69 @@
+"""What one search works on: shelf, filter bank, figures as arrays, and the limits that are held."""
+
+from __future__ import annotations
+
+from dataclasses import dataclass
+
+import numpy as np
+from numpy.typing import NDArray
+
+from selector.candidate import Conditions
+from selector.candidate.figures import NO_RESISTOR, ResistorFigures, resistor_figures, stacked
+from selector.limits import LIMITS, FilterCheck, Limit, PointCheck
+from selector.search.bank import FilterBank, bank_of
+from selector.search.objective import Objective
+from selector.search.shelf import Shelf
+
+ALL_LIMITS = frozenset(limit.name for limit in LIMITS)
+
+
+@dataclass(frozen=True, slots=True)
+class Bench:
+    """A search that is set up: what is made small, and which limits are held meanwhile."""
+
+    shelf: Shelf
+    bank: FilterBank
+    resistors: ResistorFigures
+    objective: Objective
+    held: frozenset[str] = ALL_LIMITS
+
+    @property
+    def conditions(self) -> Conditions:
+        """Return the conditions of the spec."""
+        return self.shelf.conditions
+
+    @property
+    def lifted(self) -> frozenset[str]:
+        """Return the limits that are not held."""
+        return ALL_LIMITS - self.held
+
+    @property
+    def limits(self) -> tuple[Limit, ...]:
+        """Return the limits that are held, in their order."""
+        return tuple(limit for limit in LIMITS if limit.name in self.held)
+
+    @property
+    def needs_filter(self) -> bool:
+        """Return whether a held limit can only be judged with the output filter."""
+        return any(
+            limit.thins or any(isinstance(check, FilterCheck | PointCheck) for check in limit.checks)
+            for limit in self.limits
+        )
+
+    def figure(
+        self, power: NDArray[np.float64], burden: float, headroom: NDArray[np.float64], error: NDArray[np.float64]
+    ) -> NDArray[np.float64]:
+        """Return the objective, infinite where the error is: a combination that is out has no figure."""
+        figure = np.asarray(self.objective.of(power, burden, headroom, error), dtype=float)
+        return np.where(np.isfinite(error), figure, np.inf)
+
+
+def bench_of(shelf: Shelf, objective: Objective) -> Bench:
+    """Return the set-up of a search under all limits."""
+    resistors = [resistor_figures(part) for part in shelf.resistors]
+    return Bench(
+        shelf,
+        bank_of(shelf.conditions, shelf.resistors, shelf.capacitors),
+        stacked(resistors) if resistors else NO_RESISTOR,
+        objective,
+    )
