@@ -3,6 +3,7 @@
 from __future__ import annotations
 
 from dataclasses import dataclass
+from functools import cached_property
 
 import numpy as np
 from numpy.typing import NDArray
@@ -10,14 +11,16 @@ from numpy.typing import NDArray
 from selector.candidate import Conditions
 from selector.candidate.figures import NO_RESISTOR, ResistorFigures, resistor_figures, stacked
 from selector.limits import LIMITS, FilterCheck, Limit, PointCheck
+from selector.limits.each.range_order import LIMIT as RANGE_ORDER
 from selector.search.bank import FilterBank, bank_of
 from selector.search.objective import Objective
 from selector.search.shelf import Shelf
 
 ALL_LIMITS = frozenset(limit.name for limit in LIMITS)
+ORDER = RANGE_ORDER.name
 
 
-@dataclass(frozen=True, slots=True)
+@dataclass(frozen=True)
 class Bench:
     """A search that is set up: what is made small, and which limits are held meanwhile."""
 
@@ -32,23 +35,33 @@ class Bench:
         """Return the conditions of the spec."""
         return self.shelf.conditions
 
-    @property
+    @cached_property
     def lifted(self) -> frozenset[str]:
         """Return the limits that are not held."""
         return ALL_LIMITS - self.held
 
-    @property
+    @cached_property
     def limits(self) -> tuple[Limit, ...]:
         """Return the limits that are held, in their order."""
         return tuple(limit for limit in LIMITS if limit.name in self.held)
 
-    @property
+    @cached_property
     def needs_filter(self) -> bool:
         """Return whether a held limit can only be judged with the output filter."""
         return any(
             limit.thins or any(isinstance(check, FilterCheck | PointCheck) for check in limit.checks)
             for limit in self.limits
         )
+
+    @cached_property
+    def holds_points(self) -> bool:
+        """Return whether the error is held to what is allowed."""
+        return any(isinstance(check, PointCheck) for limit in self.limits for check in limit.checks)
+
+    @cached_property
+    def ordered(self) -> bool:
+        """Return whether borders and gains are held to their strict order."""
+        return ORDER in self.held
 
     def figure(
         self, power: NDArray[np.float64], burden: float, headroom: NDArray[np.float64], error: NDArray[np.float64]

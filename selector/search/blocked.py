@@ -11,7 +11,6 @@ from selector.limits import LIMITS
 from selector.parts import Amplifier, Shunt
 from selector.real import Real
 from selector.search.bench import ALL_LIMITS, Bench
-from selector.search.cells import Cells
 from selector.search.engine import Engine
 from selector.search.found import NothingFits
 from selector.search.objective import LargestUse, Score
@@ -67,7 +66,5 @@ def _reaches(bench: Bench, place: int, shunt: Shunt, amplifier: Amplifier) -> bo
     held = frozenset(limit.name for limit in LIMITS[:place])
     narrowed = replace(bench, objective=Anything(), held=held)
     standing = Standing(1, variants=True)
-    if not any(True for _ in Cells(narrowed).frames(shunt, amplifier)):
-        return False
     Engine(narrowed, standing).run([(shunt, amplifier)], first_only=True)
     return bool(standing.best())

@@ -22,7 +22,9 @@ from selector.candidate.uses import idle_power_w
 from selector.parts import Amplifier, Shunt
 from selector.search.assess import chain_of, stopped_at, uses_of
 from selector.search.bench import Bench
-from selector.search.cells import Cell, Cells, Frame
+from selector.search.cells import cells_of, over
+from selector.search.drafts import Draft, Drafts
+from selector.search.frames import Frame, frames_of
 from selector.search.layers import Layers, Paths
 from selector.search.nodes import NONE
 from selector.search.order import rounded
@@ -37,11 +39,12 @@ Progress = Callable[[int, int], None]
 
 @dataclass(frozen=True, slots=True)
 class Piece:
-    """Work on a pair, with the bound that goes with it in the queue."""
+    """Work on a pair, with what is known of it: a frame, then its draft, a cell of it, a common resistor's chains."""
 
     pair: PairKey
-    frames: tuple[Frame, ...] = ()
-    cell: Cell | None = None
+    frame: Frame
+    draft: Draft | None = None
+    cell: Draft | None = None
     place: int = 0  # of the common resistor that comes next in the cell
     layers: Layers | None = None
     least: float = inf
@@ -58,23 +61,23 @@ class Engine:
         self._bench = bench
         self._standing = standing
         self._progress = progress
-        self._cells = Cells(bench)
+        self._drafts = Drafts(bench)
         self._queue: list[tuple[float, int, Piece]] = []
         self._number = count()
-        self._done = 0
 
     def run(self, pairs: list[tuple[Shunt, Amplifier]], *, first_only: bool = False) -> None:
         """Search the pairs; with `first_only` until one combination is found."""
         for shunt, amplifier in pairs:
-            self._start(shunt, amplifier)
-        total = len(self._queue)
+            for frame in frames_of(self._bench, shunt, amplifier):
+                self._push(self._idle(frame), Piece((shunt.part, amplifier.part), frame))
+        done, total = 0, len(self._queue)
         while self._queue:
             bound, _, piece = heapq.heappop(self._queue)
             if bound <= self._most(piece.pair):
                 self._advance(piece)
-            if piece.cell is None and self._progress is not None:
-                self._done += 1
-                self._progress(self._done, total)
+            if piece.draft is None and self._progress is not None:
+                done += 1
+                self._progress(done, total)
             if first_only and self._standing.best():
                 return
 
@@ -84,11 +87,6 @@ class Engine:
     def _push(self, bound: float, piece: Piece) -> None:
         if bound < inf and bound <= self._most(piece.pair):
             heapq.heappush(self._queue, (bound, next(self._number), piece))
-
-    def _start(self, shunt: Shunt, amplifier: Amplifier) -> None:
-        frames = tuple(self._cells.frames(shunt, amplifier))
-        if frames:
-            self._push(self._idle(frames[0]), Piece((shunt.part, amplifier.part), frames=frames))
 
     def _idle(self, frame: Frame) -> float:
         """Return the figure of a pair with nothing but its power at rest and its burden."""
@@ -101,17 +99,19 @@ class Engine:
             self._look(piece)
         elif piece.cell is not None:
             self._open(piece, piece.cell)
+        elif piece.draft is not None:
+            for cell in cells_of(self._bench, piece.draft):
+                self._push(float(cell.bound[0]), replace(piece, cell=cell))
         else:
-            for frame in piece.frames:
-                for cell in self._cells.of(frame):
-                    if len(cell.bound):
-                        self._push(float(cell.bound[0]), Piece(piece.pair, cell=cell))
+            draft = self._drafts.of(piece.frame)
+            if draft is not None:
+                self._push(float(draft.bound[0]), replace(piece, draft=draft))
 
-    def _open(self, piece: Piece, cell: Cell) -> None:
+    def _open(self, piece: Piece, cell: Draft) -> None:
         """Solve the next common resistor of a cell, and leave the rest of the cell in the queue."""
         if piece.place + 1 < len(cell.bound):
             self._push(float(cell.bound[piece.place + 1]), replace(piece, place=piece.place + 1))
-        layers = cell.over(self._bench, int(cell.commons[piece.place]))
+        layers = over(self._bench, cell, int(cell.commons[piece.place]))
         least = layers.least()
         self._push(least, replace(piece, layers=layers, least=least))
 
@@ -128,7 +128,7 @@ class Engine:
         if upto < self._most(piece.pair) and reach < inf:
             self._push(upto, replace(piece, looked=upto, step=piece.step + 1))
 
-    def _designs(self, cell: Cell, common: int, paths: Paths, looked: float) -> Iterator[tuple[float, Design]]:
+    def _designs(self, cell: Draft, common: int, paths: Paths, looked: float) -> Iterator[tuple[float, Design]]:
         """Yield the designs of chains above what was looked at, by figure, cost and names."""
         rows = []
         for index in np.flatnonzero(paths.figure > looked):
@@ -138,7 +138,7 @@ class Engine:
         rows.sort(key=lambda row: row[1])
         yield from ((figure, design) for figure, _, design in rows)
 
-    def _design(self, cell: Cell, common: int, switched: list[int]) -> Design:
+    def _design(self, cell: Draft, common: int, switched: list[int]) -> Design:
         shelf, frame = self._bench.shelf, cell.frame
         pair = None if cell.filter is None else self._bench.bank.pairs[cell.filter]
         return Design(

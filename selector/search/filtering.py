@@ -13,7 +13,7 @@ from selector.candidate.figures import NO_RESISTOR, ResistorFigures
 from selector.candidate.operating import FilterAt
 from selector.limits import LIMITS, FilterCheck
 from selector.search.bench import Bench
-from selector.search.nodes import Indices, Nodes, Numbers
+from selector.search.nodes import Indices, Nodes, Numbers, shaped
 from selector.search.pick import picked
 
 
@@ -81,7 +81,7 @@ def stand_in(bench: Bench, pairing: Pairing, *, last: bool) -> StandIn | None:
     if bench.bank.figures is None:
         return None
     law = pairing.amplifier.law
-    switched = NO_RESISTOR if law.switched_name is None else _column(bench.resistors)
+    switched = NO_RESISTOR if law.switched_name is None else shaped(bench.resistors, (-1, 1))
     at = _smallest_gain(bench, pairing, switched, last=last).with_filter(bench.bank.figures)
     shape = (1 if law.switched_name is None else len(bench.shelf.resistors), len(bench.bank.pairs))
     serves = np.ones(shape, dtype=bool)
@@ -114,12 +114,6 @@ def _smallest_gain(bench: Bench, pairing: Pairing, switched: ResistorFigures, *,
     ]
     ranges = [pairing.operate(end, switched, last=last) for end in ends]
     return min(ranges, key=lambda at: float(np.min(at.gain)))
-
-
-def _column(figures: ResistorFigures) -> ResistorFigures:
-    return ResistorFigures(
-        *(np.reshape(one, (-1, 1)) for one in (figures.ohm, figures.tolerance_frac, figures.tempco_per_k))
-    )
 
 
 def _least(value: object, serves: NDArray[np.bool_]) -> Numbers:

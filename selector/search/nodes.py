@@ -1,4 +1,4 @@
-"""The ranges that a pair, a switch and a number of ranges allow, as arrays: one node per pair of gain resistors."""
+"""The ranges that a frame allows, as arrays: one node per choice of gain resistors."""
 
 from __future__ import annotations
 
@@ -9,26 +9,15 @@ from numpy.typing import NDArray
 
 from selector.budget import Combined, allowed_at, combined, zeroed
 from selector.candidate import Operating, Pairing
-from selector.candidate.chain import Chain
 from selector.candidate.figures import NO_RESISTOR, ResistorFigures
 from selector.candidate.uses import power_w, use_headroom
-from selector.limits import (
-    FilterCheck,
-    LinkCheck,
-    PairCheck,
-    PointCheck,
-    RangeCheck,
-    ShuntCheck,
-    SwitchCheck,
-    use_of,
-    worst_point,
-)
-from selector.limits.measure import AmplifierCheck
+from selector.limits import FilterCheck, LinkCheck, Measure, RangeCheck, use_of, worst_point
 from selector.search.bench import Bench
 from selector.search.pick import picked
 
 Numbers = NDArray[np.float64]
 Indices = NDArray[np.int64]
+Truths = NDArray[np.bool_]
 NONE = -1  # index of a resistor that the law does not have
 
 
@@ -48,6 +37,10 @@ class Nodes:
         """Return some of the nodes."""
         return Nodes(picked(self.at, index), self.common[index], self.switched[index])
 
+    def where(self, stands: Truths) -> Nodes:
+        """Return the nodes for which a condition holds."""
+        return self if stands.all() else self.pick(np.flatnonzero(stands))
+
 
 @dataclass(frozen=True, slots=True)
 class Judged:
@@ -63,32 +56,22 @@ class Judged:
         return Judged(self.nodes.pick(index), picked(self.error, index), self.power[index], self.headroom[index])
 
 
-def pair_stands(bench: Bench, chain: Chain) -> bool:
-    """Return whether a pair with its switch meets every held limit that needs no resistor."""
-    early = AmplifierCheck | ShuntCheck | SwitchCheck | PairCheck
-    for limit in bench.limits:
-        for check in limit.checks:
-            if isinstance(check, early) and not all(one is None or bool(one.meets) for one in check.measured(chain)):
-                return False
-    return True
-
-
 def nodes_of(bench: Bench, pairing: Pairing, *, last: bool) -> Nodes:
     """Return every range that meets the held limits which concern it alone, before the filter is known."""
     law = pairing.amplifier.law
-    resistors = bench.resistors
-    common = NO_RESISTOR if law.common_name is None else _shaped(resistors, (-1, 1))
-    switched = NO_RESISTOR if law.switched_name is None else _shaped(resistors, (1, -1))
-    count = len(bench.shelf.resistors)
-    shape = (1 if law.common_name is None else count, 1 if law.switched_name is None else count)
+    resistors, count = bench.resistors, len(bench.shelf.resistors)
+    common = NO_RESISTOR if law.common_name is None else shaped(resistors, (-1, 1))
+    switched = NO_RESISTOR if law.switched_name is None else shaped(resistors, (1, -1))
     at = pairing.operate(common, switched, last=last)
-    stands = np.ones(shape, dtype=bool)
+    stands = np.ones((1 if law.common_name is None else count, 1 if law.switched_name is None else count), dtype=bool)
     for limit in bench.limits:
         for check in limit.checks:
             if isinstance(check, RangeCheck) and (last or not check.last_only):
                 measure = check.measure(at)
                 if measure is not None:
                     stands &= measure.meets
+    if not last and bench.ordered:
+        stands &= (at.high_a > bench.conditions.current_min_a) & (at.high_a < bench.conditions.current_max_a)
     rows, columns = np.nonzero(stands)
     return _compact(pairing, resistors, rows, columns, last=last)
 
@@ -98,9 +81,8 @@ def _compact(pairing: Pairing, resistors: ResistorFigures, rows: Indices, column
     nothing = np.full(len(rows), NONE)
     common = NO_RESISTOR if law.common_name is None else picked(resistors, rows)
     switched = NO_RESISTOR if law.switched_name is None else picked(resistors, columns)
-    at = zeroed(pairing.operate(common, switched, last=last))
-    flat = _flattened(at, len(rows))
-    return Nodes(flat, nothing if law.common_name is None else rows, nothing if law.switched_name is None else columns)
+    at = _flattened(zeroed(pairing.operate(common, switched, last=last)), len(rows))
+    return Nodes(at, nothing if law.common_name is None else rows, nothing if law.switched_name is None else columns)
 
 
 def _flattened(at: Operating, count: int) -> Operating:
@@ -110,26 +92,29 @@ def _flattened(at: Operating, count: int) -> Operating:
     return replace(at, stage=replace(at.stage, gain=gain), high_a=high_a)
 
 
-def judged_nodes(bench: Bench, nodes: Nodes) -> Judged:
-    """Return the nodes that meet the held limits which need the filter, with their combined error.
+def filtered_nodes(bench: Bench, nodes: Nodes) -> Nodes:
+    """Return the nodes that meet the held limits which need the filter.
 
     The filter must be in, or a stand-in for it that no filter can beat.
     """
-    stands = np.ones(len(nodes), dtype=bool)
-    if bench.needs_filter:
-        for limit in bench.limits:
-            for check in limit.checks:
-                measure = check.measure(nodes.at) if isinstance(check, FilterCheck) else None
-                if measure is not None:
-                    stands &= measure.meets
-    kept = nodes if stands.all() else nodes.pick(np.flatnonzero(stands))
-    shape = (len(kept),)
-    conditions = bench.conditions
+    if not bench.needs_filter:
+        return nodes
+    for limit in bench.limits:
+        for check in limit.checks:
+            measure = check.measure(nodes.at) if isinstance(check, FilterCheck) and len(nodes) else None
+            if measure is not None:
+                nodes = nodes.where(_truths(measure, len(nodes)))
+    return nodes
+
+
+def judged(bench: Bench, nodes: Nodes) -> Judged:
+    """Return the nodes with their combined error, where the limits that are held ask for it."""
+    shape, conditions = (len(nodes),), bench.conditions
     return Judged(
-        kept,
-        combined(kept.at) if bench.needs_filter else None,
-        np.broadcast_to(np.asarray(power_w(kept.at) / conditions.power_limit_w), shape),
-        np.broadcast_to(np.asarray(use_headroom(kept.at)), shape),
+        nodes,
+        combined(nodes.at) if bench.needs_filter else None,
+        np.broadcast_to(np.asarray(power_w(nodes.at) / conditions.power_limit_w), shape),
+        np.broadcast_to(np.asarray(use_headroom(nodes.at)), shape),
     )
 
 
@@ -139,26 +124,35 @@ def links(bench: Bench, at: Operating, error: Combined | None, shape: tuple[int,
     use: Numbers = np.zeros(shape)
     for limit in bench.limits:
         for check in limit.checks:
-            if isinstance(check, LinkCheck):
-                measure = check.measure(at)
-                if measure is not None:
-                    stands &= measure.meets
-            elif isinstance(check, PointCheck) and error is not None:
-                stands &= check.measure(at, error).meets
+            measure = check.measure(at) if isinstance(check, LinkCheck) else None
+            if measure is not None:
+                stands &= measure.meets
     if error is not None:
-        use = use + use_of(worst_point(at, error))
+        point = worst_point(at, error)
+        use = use + use_of(point)
+        if bench.holds_points:
+            stands &= point.meets
     return np.where(stands, use, np.inf)
 
 
-def top_use(bench: Bench, judged: Judged) -> Numbers:
-    """Return the use of the allowed error at the upper border alone: at most the use of the whole range."""
-    at = judged.nodes.at
-    if judged.error is None:
-        return np.zeros(len(judged.nodes))
-    return np.asarray(judged.error.error_a(at.high_a) / allowed_at(bench.conditions, at.high_a), dtype=float)
+def top_use(bench: Bench, ranges: Judged) -> Numbers:
+    """Return the use of the allowed error at the upper border alone: at most the use of the whole range.
+
+    Infinite where it is not allowed.
+    """
+    at = ranges.nodes.at
+    if ranges.error is None:
+        return np.zeros(len(ranges.nodes))
+    point = Measure(ranges.error.error_a(at.high_a), allowed_at(bench.conditions, at.high_a))
+    use = np.asarray(use_of(point), dtype=float)
+    return np.where(point.meets, use, np.inf) if bench.holds_points else use
 
 
-def _shaped(figures: ResistorFigures, shape: tuple[int, int]) -> ResistorFigures:
-    return ResistorFigures(
-        *(np.reshape(one, shape) for one in (figures.ohm, figures.tolerance_frac, figures.tempco_per_k))
-    )
+def shaped(figures: ResistorFigures, shape: tuple[int, int]) -> ResistorFigures:
+    """Return the figures of resistors as arrays of another shape."""
+    each = (figures.ohm, figures.tolerance_frac, figures.tempco_per_k)
+    return ResistorFigures(*(np.reshape(one, shape) for one in each))
+
+
+def _truths(measure: Measure, count: int) -> Truths:
+    return np.broadcast_to(np.asarray(measure.meets, dtype=bool), (count,))

@@ -19,7 +19,7 @@ class Ranges(Section):
     overlap: Annotated[float, fraction("hysteresis between two ranges", "10 %")] = 0.1
     by: Annotated[
         Literal["gain", "shunt", "either"],
-        choice("what changes from range to range: the gain, the shunt, or the better", "gain", "shunt", "either"),
+        choice("what changes from range to range", "gain", "shunt", "either"),
     ] = "gain"
 
 
@@ -36,7 +36,7 @@ class Parts(Section):
 
     from_: Annotated[
         Literal["stock", "all"],
-        choice("parts to choose from: enough in stock, or all of the catalogue", "stock", "all"),
+        choice("parts to choose from", "stock", "all"),
         Field(alias="from"),
     ] = "stock"
     boards: Annotated[int, count("boards to be built", "1", 1)] = 1

@@ -19,9 +19,7 @@ class Supply(Section):
 class Sense(Section):
     """Where the shunt lies."""
 
-    side: Annotated[Literal["low", "high"], choice("shunt in the return (low) or in the bus (high)", "low", "high")] = (
-        "low"
-    )
+    side: Annotated[Literal["low", "high"], choice("shunt in the return or in the bus", "low", "high")] = "low"
     bus_min: Annotated[float | None, amount(VOLTAGE, "lowest bus voltage; needed at the high side", "3 V")] = None
     bus_nominal: Annotated[float | None, amount(VOLTAGE, "nominal bus voltage; needed at the high side", "3.3 V")] = (
         None
@@ -34,7 +32,7 @@ class Output(Section):
     """The window in which the output must stay, and its zero."""
 
     low: Annotated[float, amount(VOLTAGE, "lowest output voltage to be used", "0 V")] = 0.0
-    high: Annotated[float | None, value(VOLTAGE, "highest output voltage to be used", "3.3 V")] = None
+    high: Annotated[float | None, value(VOLTAGE, "highest output voltage to be used, else the supply", "3.3 V")] = None
     zero: Annotated[float, amount(VOLTAGE, "output at no current", "0 V")] = 0.0
     zero_tolerance: Annotated[
         float | None, fraction("of zero to the converter's reference; needed where zero > 0", "0.1 %")

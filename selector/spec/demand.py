@@ -56,7 +56,7 @@ class Accuracy(Section):
         Literal["none", "zero", "zero-and-span"],
         choice("what each board is calibrated for", "none", "zero", "zero-and-span"),
     ] = "none"
-    calibration_uncertainty: Annotated[float, fraction("of the known current of the calibration", "0.1 %")] = 0.0
+    calibration_uncertainty: Annotated[float, fraction("error of the calibration's known current", "0.1 %")] = 0.0
 
 
 class Limits(Section):

@@ -14,6 +14,7 @@ _SIGN = re.compile(
     r"|(?P<bare>[^\s\[\]{}=,.\"'\#]+|.)",
     re.DOTALL,
 )
+_DEEPEST = 6  # steps of a dotted key that are followed; a spec has three
 
 
 @dataclass(slots=True)
@@ -64,7 +65,7 @@ class _Walk:
 
     def _key_ends(self, line: int) -> None:
         name = self.brackets[-1].inside if self.brackets else self.table
-        for part in self.parts:
+        for part in self.parts[:_DEEPEST]:
             name = f"{name}.{part}" if name else part
             self.lines.setdefault(name, line)
         self.value_of, self.at_key, self.parts = name, False, []
@@ -72,7 +73,7 @@ class _Walk:
     def _heading_ends(self, line: int) -> None:
         if not self.parts:
             return  # the second bracket of [[...]]
-        self.table = ".".join(self.parts)
+        self.table = ".".join(self.parts[:_DEEPEST])
         self.lines.setdefault(self.table, line)
         if self.header > 1:
             number = self.tables_of[self.table] = self.tables_of.get(self.table, 0) + 1
@@ -82,7 +83,7 @@ class _Walk:
 
     def _opens(self, sign: str) -> None:
         array = sign == "["
-        name = self.value_of
+        name = self.value_of if len(self.brackets) < _DEEPEST else ""
         if self.brackets and self.brackets[-1].array:
             name = self.brackets[-1].inside
         self.brackets.append(_Bracket(name, array))

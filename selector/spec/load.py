@@ -15,6 +15,8 @@ from selector.spec.model import Spec
 from selector.spec.rules import Wrong
 
 LARGEST_FILE = 1_000_000  # bytes
+# A key of so many steps says nothing, and a parser takes time by the square of them.
+_ENDLESS_KEY = re.compile(r"""(?<![\w"'\\-])(?:(?:"(?:[^"\\\n]|\\.)*"|'[^'\n]*'|[\w-]+)[ \t]*\.[ \t]*){30}""")
 _PLACE = re.compile(r" \(at (?:line (\d+), column \d+|end of document)\)$")
 _LAST_STEP = re.compile(r"(\.[^.\[\]]*|\[\d+\]|^[^.]*)$")
 
@@ -88,6 +90,10 @@ def _text(path: Path) -> str:
 
 def _parsed(text: str, name: str) -> dict[str, object]:
     """Return the tables of a TOML text; a syntax fault stands alone, since nothing after it can be read."""
+    endless = _ENDLESS_KEY.search(text)
+    if endless is not None:
+        line = text.count("\n", 0, endless.start()) + 1
+        raise InputRefused(Fault(f"{name} line {line}", "a key of 30 steps or more", "a key has two, as in limits.burden"))
     try:
         return tomllib.loads(text)
     except RecursionError as error:

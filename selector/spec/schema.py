@@ -2,13 +2,12 @@
 
 from __future__ import annotations
 
-import tomllib
 from collections.abc import Callable, Iterable
 
 from selector.spec.holds import Holds, Sort
 from selector.spec.keys import BAND_KEYS, KEYS, SECTIONS, Key
 
-Json = dict[str, "Json | list[Json] | list[str] | str | float | int | bool"]
+Json = dict[str, object]
 
 DIALECT = "https://json-schema.org/draft/2020-12/schema"
 
@@ -18,17 +17,21 @@ def schema() -> Json:
 
     Rules over several keys that a schema can say are in it; all others are judged when a spec is read.
     """
-    tables: Json = {section: _table(key for key in KEYS.values() if key.section == section) for section in SECTIONS}
+    tables = {
+        section: {
+            **_table(key for key in KEYS.values() if key.section == section),
+            **_OVER_SEVERAL_KEYS.get(section, {}),
+        }
+        for section in SECTIONS
+    }
     above = {key.leaf: _property(key) for key in KEYS.values() if not key.section}
-    required = [section for section in SECTIONS if any(key.required for key in KEYS.values() if key.section == section)]
-    for section, more in _OVER_SEVERAL_KEYS.items():
-        tables[section] = {**_object(tables[section]), **more}
+    required = {"accuracy", *(key.section for key in KEYS.values() if key.required)}
     return {
         "$schema": DIALECT,
         "title": "selector measurement spec",
         "type": "object",
         "properties": {**above, **tables},
-        "required": [*required, "accuracy"],
+        "required": [section for section in SECTIONS if section in required],
         "additionalProperties": False,
     }
 

@@ -18,7 +18,7 @@ _WIDTH = 34
 _HEAD = """\
 # What is to be measured. A text has its unit ("60 uA", "2 %"); a bare number is
 # in SI units (degC for temperatures, LSB for inl, a fraction for what is relative).
-# Lines that begin with # are optional keys with their defaults.
+# Keys behind a # are optional: their defaults, or an example where there is none.
 """
 
 
@@ -53,7 +53,7 @@ def _line(key: Key, given: Mapping[str, str]) -> str:
 
 def _filled(given: Mapping[str, str]) -> tuple[str, ...]:
     """Return the optional keys that are filled with their examples unless given."""
-    shown = _SHOWN_UNASKED
+    shown: tuple[str, ...] = _SHOWN_UNASKED
     if any(name in given for name in ("accuracy.bands", *_INSTEAD_OF_BANDS)):
         shown = tuple(name for name in shown if name not in _INSTEAD_OF_BANDS)
     high_side = "sense.side" in given and override_value(given["sense.side"]) == "high"
@@ -62,8 +62,8 @@ def _filled(given: Mapping[str, str]) -> tuple[str, ...]:
 
 def _commented(entry: str, key: Key) -> str:
     choices = f": {', '.join(key.holds.choices)}" if key.holds.choices else ""
-    unset = "" if key.required or key.default not in (None, ()) else "; none unless stated"
-    meaning = f"# {key.meaning}{choices}{unset}"
+    no_default = " (no default)" if entry.startswith("#") and key.default in (None, ()) else ""
+    meaning = f"# {key.meaning}{choices}{no_default}"
     return f"{entry:<{_WIDTH}}  {meaning}" if len(entry) <= _WIDTH else f"{meaning}\n{entry}"
 
 
@@ -79,10 +79,9 @@ def _default(key: Key) -> str:
 
 
 def _toml(text: str) -> str:
-    """Return a text as a TOML value: as it stands where it is one on a single line, else as a string."""
-    if isinstance(override_value(text), str) and not text.strip().startswith(('"', "'")):
-        return _string(text)
-    return text.strip() if "\n" not in text and "#" not in text else _string(text)
+    """Return a text as a TOML value: as it stands where it is one, else as a string."""
+    value = override_value(text)
+    return _string(value) if isinstance(value, str) else text.strip()
 
 
 def _string(text: str) -> str:

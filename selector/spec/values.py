@@ -12,7 +12,7 @@ from selector.spec.keys import BAND_KEYS, Key
 from selector.spec.named_lists import NamedLists
 from selector.spec.nearest import did_you_mean
 from selector.spec.rules import Value, Wrong
-from selector.units import QuantityError, parse
+from selector.units import Quantity, QuantityError, parse
 
 _LONGEST_SHOWN = 60
 
@@ -50,7 +50,7 @@ def _figure(raw: object, holds: Holds) -> Value:
         noun = quantity.name if quantity else "figure"
         raise KeyRefused(f"{as_read(raw)} is no {noun}", holds.wanted)
     if isinstance(raw, str):
-        figure = parse(raw, quantity)
+        figure = _parsed(raw, quantity, holds.example)
     else:
         figure = float(raw) if isinstance(raw, float) or abs(raw) < TOO_LARGE else TOO_LARGE if raw > 0 else -TOO_LARGE
     holds.check(figure, as_read(raw))
@@ -59,6 +59,14 @@ def _figure(raw: object, holds: Holds) -> Value:
     if not figure.is_integer():
         raise KeyRefused(f"{as_read(raw)} is no whole number", holds.wanted)
     return int(figure)
+
+
+def _parsed(text: str, quantity: Quantity, example: str) -> float:
+    """Return the figure of a text; a fault shows the key's own example."""
+    try:
+        return parse(text, quantity)
+    except QuantityError as refused:
+        raise KeyRefused(refused.what, refused.remedy.replace(quantity.example, example)) from refused
 
 
 def _choice(raw: object, holds: Holds) -> Value:
@@ -77,9 +85,11 @@ def _flag(raw: object, holds: Holds) -> Value:
 
 
 def _text(raw: object, _holds: Holds) -> Value:
-    if isinstance(raw, str):
-        return raw.strip()
-    raise KeyRefused(f"{as_read(raw)} is no text", "write it in quotes")
+    if not isinstance(raw, str):
+        raise KeyRefused(f"{as_read(raw)} is no text", "write it in quotes")
+    if any(unicodedata.category(sign) == "Cs" for sign in raw):
+        raise KeyRefused(f"{as_read(raw)} holds half a character", "write it as UTF-8")
+    return raw.strip()
 
 
 def _codes(raw: object, holds: Holds) -> tuple[str, ...]:

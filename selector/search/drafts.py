@@ -1,0 +1,129 @@
+"""The ranges of a frame that could be part of a combination, thinned with the best filter that any could have."""
+
+from __future__ import annotations
+
+from dataclasses import dataclass, replace
+from math import isfinite
+
+import numpy as np
+
+from selector.search.bench import Bench
+from selector.search.filtering import StandIn, stand_in
+from selector.search.frames import Frame
+from selector.search.nodes import (
+    NONE,
+    Indices,
+    Judged,
+    Nodes,
+    Numbers,
+    filtered_nodes,
+    judged,
+    links,
+    nodes_of,
+    top_use,
+)
+
+
+@dataclass(frozen=True, slots=True)
+class Draft:
+    """First, inner and last ranges that are left, with a bound for each common resistor.
+
+    `layers` has one entry per range; `first_use` is the use of each first range. No combination with the common
+    resistor `commons[n]` has a figure below `bound[n]`; the bounds rise. `filter` is the place of the filter in
+    the bank that all of them take, None where a stand-in bounds it.
+    """
+
+    frame: Frame
+    filter: int | None
+    first_use: Numbers
+    layers: tuple[Judged, ...]
+    commons: Indices
+    bound: Numbers
+
+
+class Drafts:
+    """Makes the drafts of frames; stand-ins are kept, since many frames share them."""
+
+    def __init__(self, bench: Bench) -> None:
+        """Set up for one search."""
+        self._bench = bench
+        self._stand_ins: dict[tuple[str, ...], StandIn | None] = {}
+
+    def of(self, frame: Frame) -> Draft | None:
+        """Return the draft of a frame, None where nothing is left of it."""
+        bench = self._bench
+        last = nodes_of(bench, frame.pairing, last=True)
+        inner = nodes_of(bench, frame.pairing, last=False) if frame.range_count > 1 else last
+        if bench.needs_filter and len(last) and len(inner):
+            below = self._stand_in(frame, last=frame.range_count == 1)
+            above = self._stand_in(frame, last=True)
+            if below is None or above is None:
+                return None
+            inner, last = below.on(inner), above.on(last)
+        return layered(bench, frame, None, inner, inner, last)
+
+    def _stand_in(self, frame: Frame, *, last: bool) -> StandIn | None:
+        key: tuple[str, ...] = (frame.amplifier.part, "" if frame.switch is None else frame.switch.part)
+        if isfinite(self._bench.conditions.settle_s):
+            key += (frame.shunt.part, str(last))
+        if key not in self._stand_ins:
+            self._stand_ins[key] = stand_in(self._bench, frame.pairing, last=last)
+        return self._stand_ins[key]
+
+
+def layered(bench: Bench, frame: Frame, place: int | None, first: Nodes, inner: Nodes, last: Nodes) -> Draft | None:
+    """Return what is left when every range meets what can be judged without its neighbours, None where nothing is.
+
+    The filter of `place`, or a stand-in, is in.
+    """
+    lowest, use = _lowest(bench, first)
+    if not len(lowest.nodes):
+        return None
+    layers: tuple[Judged, ...] = (lowest,)
+    if frame.range_count > 1:
+        highest = _beside(bench, last, lowest)
+        between = [_beside(bench, inner, lowest)] * (frame.range_count - 2)
+        layers = (lowest, *between, highest)
+    if not all(len(layer.nodes) for layer in layers):
+        return None
+    return _bounded(bench, Draft(frame, place, use, layers, np.empty(0, dtype=np.int64), np.empty(0)))
+
+
+def _lowest(bench: Bench, first: Nodes) -> tuple[Judged, Numbers]:
+    ranges = judged(bench, first)
+    use = links(bench, ranges.nodes.at, ranges.error, (len(first),))
+    standing = np.flatnonzero(np.isfinite(use))
+    return _served(bench, ranges.pick(standing), use[standing])
+
+
+def _served(bench: Bench, ranges: Judged, use: Numbers) -> tuple[Judged, Numbers]:
+    count = len(ranges.nodes)
+    marked = replace(ranges.nodes, common=np.arange(count))
+    kept = filtered_nodes(bench, marked).common
+    return (ranges, use) if len(kept) == count else (ranges.pick(kept), use[kept])
+
+
+def _beside(bench: Bench, nodes: Nodes, lowest: Judged) -> Judged:
+    """Return ranges that share a common resistor with some first range and are allowed at their upper border."""
+    ranges = judged(bench, nodes.where(np.isin(nodes.common, np.unique(lowest.nodes.common))))
+    use = top_use(bench, ranges)
+    standing = np.flatnonzero(np.isfinite(use))
+    return _served(bench, ranges.pick(standing), use[standing])[0]
+
+
+def _bounded(bench: Bench, draft: Draft) -> Draft | None:
+    """Return the draft with a bound for each common resistor: the best first range beside the best last one."""
+    lowest, last = draft.layers[0], draft.layers[-1]
+    size = int(max(lowest.nodes.common.max(), last.nodes.common.max())) + 2
+    least_first = np.full(size, np.inf)
+    np.minimum.at(least_first, lowest.nodes.common, draft.first_use)
+    use = draft.first_use if len(draft.layers) == 1 else top_use(bench, last)
+    use = np.maximum(use, least_first[last.nodes.common])
+    figure = bench.figure(last.power, draft.frame.burden, last.headroom, use)
+    bound = np.full(size, np.inf)
+    np.minimum.at(bound, last.nodes.common, figure)
+    commons = np.flatnonzero(np.isfinite(bound))
+    if not len(commons):
+        return None
+    order = commons[np.argsort(bound[commons], kind="stable")]
+    return replace(draft, commons=np.where(order == size - 1, NONE, order), bound=bound[order])
