@@ -2,7 +2,7 @@
 
 from __future__ import annotations
 
-from dataclasses import dataclass
+from dataclasses import dataclass, field
 from functools import cached_property
 
 import numpy as np
@@ -15,6 +15,7 @@ from selector.limits.each.range_order import LIMIT as RANGE_ORDER
 from selector.search.bank import FilterBank, bank_of
 from selector.search.objective import Objective
 from selector.search.shelf import Shelf
+from selector.search.stand_in import StandIn
 
 ALL_LIMITS = frozenset(limit.name for limit in LIMITS)
 ORDER = RANGE_ORDER.name
@@ -29,6 +30,9 @@ class Bench:
     resistors: ResistorFigures
     objective: Objective
     held: frozenset[str] = ALL_LIMITS
+    stand_ins: dict[tuple[object, ...], StandIn | None] = field(
+        default_factory=dict, compare=False
+    )  # many frames share
 
     @property
     def conditions(self) -> Conditions:

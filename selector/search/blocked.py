@@ -13,10 +13,12 @@ from selector.real import Real
 from selector.search.bench import ALL_LIMITS, Bench
 from selector.search.engine import Engine
 from selector.search.found import NothingFits
+from selector.search.frames import every_frame, stands
 from selector.search.objective import LargestUse, Score
 from selector.search.present import present
 from selector.search.standing import Standing
 
+FILTER = next(place for place, limit in enumerate(LIMITS) if limit.thins)  # from here on a filter is needed
 RANKED = frozenset({"power", "burden", "headroom", "error"})
 
 
@@ -51,15 +53,24 @@ def _furthest(bench: Bench, shunt: Shunt, amplifier: Amplifier) -> int:
     A combination stops at limit n or later where it meets all limits before n, so the furthest is the last n for
     which there is one that does; found by halving, the likeliest places first.
     """
-    low, high = 0, len(LIMITS) - 1  # meets all before `low`; none meets all before `high + 1`
-    guess = high
+    low, high = 0, _early_stop(bench, shunt, amplifier)
+    guess = high if high < len(LIMITS) - 1 else FILTER
     while low < high:
         if _reaches(bench, guess, shunt, amplifier):
             low = guess
         else:
             high = guess - 1
-        guess = (low + high + 1) // 2
+        guess = (low + high + 1) // 2 if low != FILTER else high
     return low
+
+
+def _early_stop(bench: Bench, shunt: Shunt, amplifier: Amplifier) -> int:
+    """Return the place of the furthest limit that stops a frame of the pair before any resistor is chosen."""
+    furthest = 0
+    for frame in every_frame(bench, shunt, amplifier):
+        stops = (place for place, limit in enumerate(LIMITS) if not stands(limit, frame.chain))
+        furthest = max(furthest, next(stops, len(LIMITS) - 1))
+    return furthest
 
 
 def _reaches(bench: Bench, place: int, shunt: Shunt, amplifier: Amplifier) -> bool:

@@ -11,11 +11,11 @@ import numpy as np
 from selector.candidate import Operating
 from selector.parts import Part
 from selector.search.bench import Bench
-from selector.search.drafts import Draft, layered
+from selector.search.drafts import Draft, Thread, layered
 from selector.search.filtering import stretches
 from selector.search.frames import Frame
 from selector.search.layers import Layers
-from selector.search.nodes import Indices, Judged, Nodes
+from selector.search.nodes import Indices, Nodes
 from selector.search.pick import picked
 
 
@@ -34,22 +34,20 @@ def cells_of(bench: Bench, draft: Draft) -> Iterator[Draft]:
     for stretch in stretches(bench, first):
         if _settled(bench, draft.frame, stretch.filter):
             nodes = (_with_filter(bench, one, stretch.filter) for one in (first.pick(stretch.nodes), inner, last))
-            cell = layered(bench, draft.frame, stretch.filter, *nodes)
+            cell = layered(bench, draft.frame, stretch.filter, Thread(*nodes))
             if cell is not None:
                 yield cell
         else:
             doubtful.append(stretch.nodes)
     if doubtful:
-        cell = layered(bench, draft.frame, None, first.pick(np.unique(np.concatenate(doubtful))), inner, last)
+        cell = layered(bench, draft.frame, None, Thread(first.pick(np.unique(np.concatenate(doubtful))), inner, last))
         if cell is not None:
             yield cell
 
 
 def over(bench: Bench, cell: Draft, common: int) -> Layers:
     """Return the chains of a cell over one common resistor."""
-    kept: list[Judged] = []
-    for layer in cell.layers:
-        kept.append(layer.pick(np.flatnonzero(layer.nodes.common == common)))
+    kept = [layer.pick(np.flatnonzero(layer.nodes.common == common)) for layer in cell.layers]
     first_use = cell.first_use[cell.layers[0].nodes.common == common]
     return Layers(bench, cell.frame.burden, first_use, tuple(kept))
 

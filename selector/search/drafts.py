@@ -8,7 +8,7 @@ from math import isfinite
 import numpy as np
 
 from selector.search.bench import Bench
-from selector.search.filtering import StandIn, stand_in
+from selector.search.filtering import stand_in, with_stand_in
 from selector.search.frames import Frame
 from selector.search.nodes import (
     NONE,
@@ -22,6 +22,7 @@ from selector.search.nodes import (
     nodes_of,
     top_use,
 )
+from selector.search.stand_in import StandIn
 
 
 @dataclass(frozen=True, slots=True)
@@ -41,48 +42,50 @@ class Draft:
     bound: Numbers
 
 
-class Drafts:
-    """Makes the drafts of frames; stand-ins are kept, since many frames share them."""
-
-    def __init__(self, bench: Bench) -> None:
-        """Set up for one search."""
-        self._bench = bench
-        self._stand_ins: dict[tuple[str, ...], StandIn | None] = {}
-
-    def of(self, frame: Frame) -> Draft | None:
-        """Return the draft of a frame, None where nothing is left of it."""
-        bench = self._bench
-        last = nodes_of(bench, frame.pairing, last=True)
-        inner = nodes_of(bench, frame.pairing, last=False) if frame.range_count > 1 else last
-        if bench.needs_filter and len(last) and len(inner):
-            below = self._stand_in(frame, last=frame.range_count == 1)
-            above = self._stand_in(frame, last=True)
-            if below is None or above is None:
-                return None
-            inner, last = below.on(inner), above.on(last)
-        return layered(bench, frame, None, inner, inner, last)
-
-    def _stand_in(self, frame: Frame, *, last: bool) -> StandIn | None:
-        key: tuple[str, ...] = (frame.amplifier.part, "" if frame.switch is None else frame.switch.part)
-        if isfinite(self._bench.conditions.settle_s):
-            key += (frame.shunt.part, str(last))
-        if key not in self._stand_ins:
-            self._stand_ins[key] = stand_in(self._bench, frame.pairing, last=last)
-        return self._stand_ins[key]
+def draft_of(bench: Bench, frame: Frame) -> Draft | None:
+    """Return the draft of a frame, None where nothing is left of it."""
+    last = nodes_of(bench, frame.pairing, last=True)
+    inner = nodes_of(bench, frame.pairing, last=False) if frame.range_count > 1 else last
+    if bench.needs_filter and len(last) and len(inner):
+        below = _kept_stand_in(bench, frame, last=frame.range_count == 1)
+        above = _kept_stand_in(bench, frame, last=True)
+        if below is None or above is None:
+            return None
+        inner, last = with_stand_in(below, inner), with_stand_in(above, last)
+    return layered(bench, frame, None, Thread(inner, inner, last))
 
 
-def layered(bench: Bench, frame: Frame, place: int | None, first: Nodes, inner: Nodes, last: Nodes) -> Draft | None:
+def _kept_stand_in(bench: Bench, frame: Frame, *, last: bool) -> StandIn | None:
+    """Return the stand-in of a frame, the same one for all frames that cannot differ in it."""
+    key: tuple[object, ...] = (bench.held, frame.amplifier.part, frame.switch and frame.switch.part)
+    if isfinite(bench.conditions.settle_s):
+        key += (frame.shunt.part, last)
+    if key not in bench.stand_ins:
+        bench.stand_ins[key] = stand_in(bench, frame.pairing, last=last)
+    return bench.stand_ins[key]
+
+
+@dataclass(frozen=True, slots=True)
+class Thread:
+    """The ranges that may be first, inner and last."""
+
+    first: Nodes
+    inner: Nodes
+    last: Nodes
+
+
+def layered(bench: Bench, frame: Frame, place: int | None, nodes: Thread) -> Draft | None:
     """Return what is left when every range meets what can be judged without its neighbours, None where nothing is.
 
     The filter of `place`, or a stand-in, is in.
     """
-    lowest, use = _lowest(bench, first)
+    lowest, use = _lowest(bench, nodes.first)
     if not len(lowest.nodes):
         return None
     layers: tuple[Judged, ...] = (lowest,)
     if frame.range_count > 1:
-        highest = _beside(bench, last, lowest)
-        between = [_beside(bench, inner, lowest)] * (frame.range_count - 2)
+        highest = _beside(bench, nodes.last, lowest)
+        between = [_beside(bench, nodes.inner, lowest)] * (frame.range_count - 2)
         layers = (lowest, *between, highest)
     if not all(len(layer.nodes) for layer in layers):
         return None

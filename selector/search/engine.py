@@ -23,7 +23,7 @@ from selector.parts import Amplifier, Shunt
 from selector.search.assess import chain_of, stopped_at, uses_of
 from selector.search.bench import Bench
 from selector.search.cells import cells_of, over
-from selector.search.drafts import Draft, Drafts
+from selector.search.drafts import Draft, draft_of
 from selector.search.frames import Frame, frames_of
 from selector.search.layers import Layers, Paths
 from selector.search.nodes import NONE
@@ -61,12 +61,13 @@ class Engine:
         self._bench = bench
         self._standing = standing
         self._progress = progress
-        self._drafts = Drafts(bench)
         self._queue: list[tuple[float, int, Piece]] = []
         self._number = count()
+        self._first_only = False
 
     def run(self, pairs: list[tuple[Shunt, Amplifier]], *, first_only: bool = False) -> None:
         """Search the pairs; with `first_only` until one combination is found."""
+        self._first_only = first_only
         for shunt, amplifier in pairs:
             for frame in frames_of(self._bench, shunt, amplifier):
                 self._push(self._idle(frame), Piece((shunt.part, amplifier.part), frame))
@@ -78,8 +79,11 @@ class Engine:
             if piece.draft is None and self._progress is not None:
                 done += 1
                 self._progress(done, total)
-            if first_only and self._standing.best():
+            if self._found():
                 return
+
+    def _found(self) -> bool:
+        return self._first_only and bool(self._standing.best())
 
     def _most(self, pair: PairKey) -> float:
         return self._standing.most(pair) * NEARLY
@@ -103,7 +107,7 @@ class Engine:
             for cell in cells_of(self._bench, piece.draft):
                 self._push(float(cell.bound[0]), replace(piece, cell=cell))
         else:
-            draft = self._drafts.of(piece.frame)
+            draft = draft_of(self._bench, piece.frame)
             if draft is not None:
                 self._push(float(draft.bound[0]), replace(piece, draft=draft))
 
@@ -125,6 +129,8 @@ class Engine:
         paths = piece.layers.up_to(upto)
         for figure, design in self._designs(piece.cell, int(piece.cell.commons[piece.place]), paths, piece.looked):
             self._judge(piece, figure, design)
+            if self._found():
+                return
         if upto < self._most(piece.pair) and reach < inf:
             self._push(upto, replace(piece, looked=upto, step=piece.step + 1))
 

@@ -15,6 +15,7 @@ from selector.limits import LIMITS, FilterCheck
 from selector.search.bench import Bench
 from selector.search.nodes import Indices, Nodes, Numbers, shaped
 from selector.search.pick import picked
+from selector.search.stand_in import StandIn
 
 
 @dataclass(frozen=True, slots=True)
@@ -58,18 +59,10 @@ def stretches(bench: Bench, first: Nodes) -> Iterator[Stretch]:
         yield Stretch(np.unique(np.concatenate(parts)), taken)
 
 
-@dataclass(frozen=True, slots=True)
-class StandIn:
-    """For each gain resistor a filter that no filter of the bank can beat, and whether any filter serves at all."""
-
-    filter: FilterAt
-    serves: NDArray[np.bool_]
-
-    def on(self, nodes: Nodes) -> Nodes:
-        """Return the nodes that some filter serves, with the stand-in in."""
-        serving = np.flatnonzero(self.serves[nodes.switched])
-        kept = nodes.pick(serving)
-        return replace(kept, at=replace(kept.at, filter=picked(self.filter, kept.switched)))
+def with_stand_in(stand: StandIn, nodes: Nodes) -> Nodes:
+    """Return the nodes that some filter serves, with the stand-in in."""
+    kept = nodes.pick(np.flatnonzero(stand.serves[nodes.switched]))
+    return replace(kept, at=replace(kept.at, filter=picked(stand.filter, kept.switched)))
 
 
 def stand_in(bench: Bench, pairing: Pairing, *, last: bool) -> StandIn | None:

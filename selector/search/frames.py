@@ -7,7 +7,7 @@ from dataclasses import dataclass
 
 from selector.candidate import Design, Pairing
 from selector.candidate.chain import Chain
-from selector.limits import AmplifierCheck, PairCheck, ShuntCheck, SwitchCheck
+from selector.limits import AmplifierCheck, Limit, PairCheck, ShuntCheck, SwitchCheck
 from selector.parts import Amplifier, Shunt, Switch
 from selector.search.assess import pairing_of
 from selector.search.bench import Bench
@@ -36,18 +36,24 @@ class Frame:
         return float(self.pairing.burden_v / self.pairing.conditions.burden_limit_v)
 
 
-def frames_of(bench: Bench, shunt: Shunt, amplifier: Amplifier) -> Iterator[Frame]:
-    """Yield every frame of a pair that meets the held limits which need no resistor, the fewest ranges first."""
+def every_frame(bench: Bench, shunt: Shunt, amplifier: Amplifier) -> Iterator[Frame]:
+    """Yield every frame of a pair that the gain law can have, the fewest ranges first."""
     for count in range(1, bench.conditions.ranges_most + 1):
         for switch in bench.shelf.switches if count > 1 else (None,):
             bare = Design((shunt,), amplifier, switch, None, None)
             if count == 1 or bare.law.switchable:
                 pairing = pairing_of(bench.conditions, bare, count)
-                frame = Frame(shunt, amplifier, switch, count, Chain(bare, pairing, (), frozenset(), filtered=False))
-                if _stands(bench, frame.chain):
-                    yield frame
+                yield Frame(shunt, amplifier, switch, count, Chain(bare, pairing, (), frozenset(), filtered=False))
 
 
-def _stands(bench: Bench, chain: Chain) -> bool:
-    checks = (check for limit in bench.limits for check in limit.checks if isinstance(check, EARLY))
+def frames_of(bench: Bench, shunt: Shunt, amplifier: Amplifier) -> Iterator[Frame]:
+    """Yield every frame that meets the held limits which need no resistor."""
+    for frame in every_frame(bench, shunt, amplifier):
+        if all(stands(limit, frame.chain) for limit in bench.limits):
+            yield frame
+
+
+def stands(limit: Limit, chain: Chain) -> bool:
+    """Return whether a frame meets a limit, as far as that can be judged without a resistor."""
+    checks = (check for check in limit.checks if isinstance(check, EARLY))
     return all(measure is None or bool(measure.meets) for check in checks for measure in check.measured(chain))
