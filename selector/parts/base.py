@@ -45,6 +45,10 @@ class Part(BaseModel):
         rules = (known_fields(cls.model_fields), *cls.rules)
         return [wrong for rule in rules for wrong in rule(values)]
 
+    def derived(self) -> frozenset[str]:
+        """Return the fields whose values follow from other fields, so that they need not be stated."""
+        return frozenset()
+
     @model_validator(mode="after")
     def _holds_together(self) -> Self:
         """Refuse figures that cannot stand beside each other."""

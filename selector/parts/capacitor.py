@@ -28,6 +28,11 @@ class Capacitor(Part):
     voltage: Annotated[float | None, value(VOLTAGE)] = None
     package: Text = ""
 
+    def derived(self) -> frozenset[str]:
+        """Return `temp_change` where it is what the dielectric code gives."""
+        by_code = self.temp_change is not None and self.temp_change == dielectric_change_frac(self.dielectric)
+        return frozenset({"temp_change"}) if by_code else frozenset()
+
     @model_validator(mode="before")
     @classmethod
     def _change_by_code(cls, given: object) -> object:

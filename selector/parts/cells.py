@@ -14,7 +14,7 @@ from selector.units import exact, parse
 
 _YES = ("yes", "true", "1")
 _NO = ("no", "false", "0")
-_LONGEST_SHOWN = 60
+LONGEST_SHOWN = 60
 _BETWEEN_NAMES = re.compile(r"[\s,;]+")
 
 
@@ -53,10 +53,10 @@ def as_read(raw: object) -> str:
     """Return how a message shows what was read: text in quotes, long text cut."""
     if isinstance(raw, str):
         text = raw.strip()
-        return f'"{text if len(text) <= _LONGEST_SHOWN else text[:_LONGEST_SHOWN] + "..."}"'
+        return f'"{text if len(text) <= LONGEST_SHOWN else text[:LONGEST_SHOWN] + "..."}"'
     if isinstance(raw, bool):
         return "true" if raw else "false"
-    if isinstance(raw, float) or (isinstance(raw, int) and abs(raw) < 10**_LONGEST_SHOWN):
+    if isinstance(raw, float) or (isinstance(raw, int) and abs(raw) < 10**LONGEST_SHOWN):
         return repr(raw)
     if isinstance(raw, int):
         return "a number of very many digits"
@@ -113,6 +113,8 @@ def _names(raw: object, _column: Column) -> Value:
 
 
 def _like(column: Column) -> str:
+    if column.choices:
+        return f"{column.name} is one of {', '.join(map(str, column.choices))}"
     return f"write it like {column.quantity.example}" if column.quantity else ""
 
 

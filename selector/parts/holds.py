@@ -41,11 +41,13 @@ class Holds:
         if value is None:
             return
         if self.choices and value not in self.choices:
-            raise CellRefused(f"{read} is no {name}", f"write one of {', '.join(map(str, self.choices))}")
+            raise CellRefused(f"{read} is not known", f"{name} is one of {', '.join(map(str, self.choices))}")
         if self.quantity is None or isinstance(value, str | tuple):
             return
         if not math.isfinite(value):
             raise CellRefused(f"{read} is no finite number", f"{name} must be finite")
+        if abs(value) >= TOO_LARGE:
+            raise CellRefused(f"{read} is too large for any calculation", f"{name} must be below 1e15")
         if self.above is not None and not value > self.above:
             raise CellRefused(f"{read} is too small", f"{name} must be above {_bound(self.above, self.quantity)}")
         if self.least is not None and not value >= self.least:

@@ -24,7 +24,7 @@ def figures_of_the_law(values: Mapping[str, Value]) -> Iterator[Wrong]:
             yield Wrong(figure, "missing", f"a {law.name} amplifier needs {figure}")
         if figure not in law.figures and stated not in (None, _UNREAD, _DEFAULTS.get(figure)):
             wanted = ", ".join(law.figures) or "none"
-            yield Wrong(figure, f"{stated} on a {law.name} amplifier", f"leave it out; figures of this law: {wanted}")
+            yield Wrong(figure, f"stated on a {law.name} amplifier", f"leave it out; the figures of this law: {wanted}")
 
 
 def buffered_gain_capacitor(values: Mapping[str, Value]) -> Iterator[Wrong]:

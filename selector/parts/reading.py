@@ -6,7 +6,7 @@ from collections.abc import Iterator, Mapping
 
 from selector.errors import Fault, InputRefused
 from selector.parts.base import Part
-from selector.parts.cells import cell_of, read_cell
+from selector.parts.cells import LONGEST_SHOWN, cell_of, read_cell
 from selector.parts.columns import columns, columns_of
 from selector.parts.holds import Value
 from selector.parts.kinds import KINDS
@@ -43,9 +43,10 @@ def read_part(kind: str, cells: Mapping[str, object], *, where: str, bare: bool 
 def cells_of(part: Part) -> dict[str, str]:
     """Return the fields that a part states, as texts from which `read_part` makes an equal part.
 
-    A field is stated where it is required or differs from its default.
+    A field is stated where it is required, or differs from its default and does not follow from other fields.
     """
-    stated = ((column, getattr(part, column.name)) for column in columns_of(type(part)))
+    derived = part.derived()
+    stated = ((column, getattr(part, column.name)) for column in columns_of(type(part)) if column.name not in derived)
     return {
         column.name: cell_of(value, column)
         for column, value in stated
@@ -61,7 +62,7 @@ def kind_of(part: Part) -> str:
 def _values(kind: str, cells: Mapping[str, object], *, bare: bool) -> tuple[dict[str, Value], list[Wrong]]:
     """Return the values of all fields that could be read, defaults included, and what is wrong with the others."""
     known = {column.name: column for column in columns(kind)}
-    wrong = list(_unknown(cells, known))
+    wrong = list(_unknown(cells, known, kind))
     values: dict[str, Value] = {}
     for name, column in known.items():
         try:
@@ -77,10 +78,12 @@ def _values(kind: str, cells: Mapping[str, object], *, bare: bool) -> tuple[dict
     return values, wrong
 
 
-def _unknown(cells: Mapping[str, object], known: Mapping[str, object]) -> Iterator[Wrong]:
+def _unknown(cells: Mapping[str, object], known: Mapping[str, object], kind: str) -> Iterator[Wrong]:
     for name in cells:
         if name not in known:
-            yield Wrong("", f'unknown field "{name}"', nearest(name, known))
+            short = name if len(name) <= LONGEST_SHOWN else name[:LONGEST_SHOWN] + "..."
+            remedy = nearest(short, known) or f"a part of kind {kind} has {', '.join(known)}"
+            yield Wrong("", f'unknown field "{short}"', remedy)
 
 
 def _fault(wrong: Wrong, where: str) -> Fault:

@@ -46,7 +46,7 @@ def known_fields(fields: Collection[str]) -> Rule:
             names = values.get(field)
             for name in names if isinstance(names, tuple) else ():
                 if name not in fields:
-                    yield Wrong(field, f'"{name}" is no field', nearest(name, fields))
+                    yield Wrong(field, f'"{name}" is no field', nearest(name, fields) or "name fields, such as part")
 
     return rule
 

@@ -67,7 +67,7 @@ class Limits(Section):
     headroom: Annotated[float, fraction("least part of the output span left free at the highest current", "5 %")] = 0.05
     cost: Annotated[float | None, value(MONEY, "most a board's parts may cost", "4")] = None
     transient: Annotated[float | None, value(VOLTAGE, "most voltage for a moment, in stacks", "500 mV")] = None
-    load_fraction: Annotated[float, share("most part of a shunt's rated power that is used", "0.5")] = 0.5
+    load_fraction: Annotated[float, share("most part of a shunt's rated power that is used", "50 %")] = 0.5
 
 
 class Signal(Section):

@@ -27,8 +27,8 @@ class KeyRefused(QuantityError):
 class Holds:
     """What a key holds; stands in the field's Annotated type and is enforced by the model.
 
-    Bounds are in SI units: `least` <= value <= `most`, `above` < value < `below`. `choices` are the only words taken.
-    `example` is what a new spec shows, as TOML without quotes.
+    Bounds are in SI units: `least` <= value <= `most`, `above` < value < `below`; no figure reaches 1e15. `choices` are
+    the only words taken. `example` is what a new spec shows, as TOML without quotes.
     """
 
     sort: Sort
@@ -60,6 +60,8 @@ class Holds:
         """Raise KeyRefused where a figure lies outside the bounds; `read` is how it stood in the input."""
         if not math.isfinite(value):
             raise KeyRefused(f"{read} is no finite number", self.wanted)
+        if abs(value) >= TOO_LARGE:
+            raise KeyRefused(f"{read} is too large for any calculation", self.wanted)
         for bound, holds, words in (
             (self.above, operator.gt, "above"),
             (self.least, operator.ge, "at least"),
@@ -87,12 +89,12 @@ class Holds:
 
 def value(quantity: Quantity, meaning: str, example: str) -> Holds:
     """Return what holds a value or a limit: above 0."""
-    return Holds("quantity", meaning, example, quantity, above=0.0, below=TOO_LARGE)
+    return Holds("quantity", meaning, example, quantity, above=0.0)
 
 
 def amount(quantity: Quantity, meaning: str, example: str) -> Holds:
     """Return what holds an error figure or a voltage: 0 or more."""
-    return Holds("quantity", meaning, example, quantity, least=0.0, below=TOO_LARGE)
+    return Holds("quantity", meaning, example, quantity, least=0.0)
 
 
 def fraction(meaning: str, example: str) -> Holds:
@@ -102,13 +104,13 @@ def fraction(meaning: str, example: str) -> Holds:
 
 def temperature(meaning: str, example: str) -> Holds:
     """Return what holds a temperature in degrees Celsius."""
-    return Holds("quantity", meaning, example, TEMPERATURE, above=ABSOLUTE_ZERO_DEGC, below=TOO_LARGE)
+    return Holds("quantity", meaning, example, TEMPERATURE, above=ABSOLUTE_ZERO_DEGC)
 
 
 def count(meaning: str, example: str, least: int, most: int | None = None) -> Holds:
     """Return what holds a whole number between two."""
     top = None if most is None else float(most)
-    return Holds("quantity", meaning, example, COUNT, least=float(least), most=top, below=TOO_LARGE)
+    return Holds("quantity", meaning, example, COUNT, least=float(least), most=top)
 
 
 def weight(meaning: str) -> Holds:

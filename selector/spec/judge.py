@@ -61,7 +61,7 @@ def _unknown(raw: Mapping[str, object]) -> Iterator[Wrong]:
     for name in names[:_SUGGESTIONS]:
         yield unknown_key(name, KEYS if "." in name else (*KEYS, *SECTIONS))
     for name in names[_SUGGESTIONS:]:
-        yield Wrong(name, f'unknown key "{shortened(name)}"', named=False)
+        yield Wrong(name, f"unknown key {shortened(name)}", named=False)
 
 
 def _spec(values: Mapping[str, Value]) -> Spec:

@@ -99,14 +99,15 @@ class _Walk:
 def key_lines(text: str) -> dict[str, int]:
     """Return the first line of every table and key of a valid TOML text, by dotted key, counted from 1.
 
-    Elements of arrays are numbered from 1: `accuracy.bands[2].up_to`. Keys in quotes stand without them.
+    Elements of arrays are numbered from 1: `accuracy.bands[2].up_to`. Keys in quotes stand without them, unless
+    they hold a dot.
     """
     walk = _Walk()
     for kind, sign, line in _signs(text):
         if kind == "mark":
             walk.mark(sign, line)
         elif kind != "dot" and walk.at_key:
-            walk.parts.append(sign[1:-1] if kind == "text" else sign)
+            walk.parts.append(sign[1:-1] if kind == "text" and "." not in sign else sign)
     return walk.lines
 
 

@@ -93,7 +93,9 @@ def _parsed(text: str, name: str) -> dict[str, object]:
     endless = _ENDLESS_KEY.search(text)
     if endless is not None:
         line = text.count("\n", 0, endless.start()) + 1
-        raise InputRefused(Fault(f"{name} line {line}", "a key of 30 steps or more", "a key has two, as in limits.burden"))
+        raise InputRefused(
+            Fault(f"{name} line {line}", "a key of 30 steps or more", "a key has two, as in limits.burden")
+        )
     try:
         return tomllib.loads(text)
     except RecursionError as error:
@@ -101,7 +103,7 @@ def _parsed(text: str, name: str) -> dict[str, object]:
     except ValueError as error:
         message = str(error)
         place = _PLACE.search(message)
-        line = (place[1] if place else None) or text.count("\n") + 1
+        line = int(place[1]) if place and place[1] else text.count("\n") + 1
         what = f"no valid TOML: {message[: place.start()] if place else 'a number of too many digits'}"
         remedy = 'write it like burden = "100 mV", texts in quotes'
         raise InputRefused(Fault(f"{name} line {line}", what, remedy)) from error

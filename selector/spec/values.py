@@ -93,11 +93,13 @@ def _text(raw: object, _holds: Holds) -> Value:
 
 
 def _codes(raw: object, holds: Holds) -> tuple[str, ...]:
-    if isinstance(raw, list | tuple):
-        codes = tuple(_code(code) for code in raw if isinstance(code, str) and code.strip())
-        if len(codes) == len(raw):
-            return codes
-    raise KeyRefused(f"{as_read(raw)} is no list of part codes", f"write it like {holds.example}")
+    remedy = f"write it like {holds.example}"
+    if not isinstance(raw, list | tuple):
+        raise KeyRefused(f"{as_read(raw)} is no list of part codes", remedy)
+    codes = tuple(_code(code) for code in raw if isinstance(code, str) and code.strip())
+    if len(codes) < len(raw):
+        raise KeyRefused("the list holds what is no part code", remedy)
+    return codes
 
 
 def _code(code: str) -> str:
@@ -150,9 +152,7 @@ def _band(raw: object, name: str, wrong: list[Wrong]) -> Band:
 def unknown_key(name: str, known: Iterable[str]) -> Wrong:
     """Return the fault of a key that there is not, with the nearest that there is or what its table takes."""
     names = tuple(known)
-    return Wrong(
-        name, f'unknown key "{shortened(name)}"', did_you_mean(name, names) or _takes(name, names), named=False
-    )
+    return Wrong(name, f"unknown key {shortened(name)}", did_you_mean(name, names) or _takes(name, names), named=False)
 
 
 def _takes(name: str, known: tuple[str, ...]) -> str:
@@ -162,8 +162,9 @@ def _takes(name: str, known: tuple[str, ...]) -> str:
 
 
 def shortened(name: str) -> str:
-    """Return a name as a message shows it: cut where it is long."""
-    return name if len(name) <= _LONGEST_SHOWN else name[:_LONGEST_SHOWN] + "..."
+    """Return a name as a message shows it: in quotes, cut where it is long."""
+    short = name if len(name) <= _LONGEST_SHOWN else name[:_LONGEST_SHOWN] + "..."
+    return short if '"' in short else f'"{short}"'
 
 
 _SORTS: dict[type, str] = {
