@@ -1,0 +1,1 @@
+"""Times of the program against baselines that are measured beside it."""
