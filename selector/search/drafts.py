@@ -45,8 +45,12 @@ class Draft:
 def draft_of(bench: Bench, frame: Frame) -> Draft | None:
     """Return the draft of a frame, None where nothing is left of it."""
     last = nodes_of(bench, frame.pairing, last=True)
+    if not len(last):
+        return None
     inner = nodes_of(bench, frame.pairing, last=False) if frame.range_count > 1 else last
-    if bench.needs_filter and len(last) and len(inner):
+    if not len(inner):
+        return None
+    if bench.needs_filter:
         below = _kept_stand_in(bench, frame, last=frame.range_count == 1)
         above = _kept_stand_in(bench, frame, last=True)
         if below is None or above is None:

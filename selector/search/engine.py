@@ -135,14 +135,13 @@ class Engine:
             self._push(upto, replace(piece, looked=upto, step=piece.step + 1))
 
     def _designs(self, cell: Draft, common: int, paths: Paths, looked: float) -> Iterator[tuple[float, Design]]:
-        """Yield the designs of chains above what was looked at, by figure, cost and names."""
-        rows = []
-        for index in np.flatnonzero(paths.figure > looked):
-            design = self._design(cell, common, [int(one) for one in paths.switched[index]])
-            figure = float(paths.figure[index])
-            rows.append((figure, rank_of(figure, design), design))
-        rows.sort(key=lambda row: row[1])
-        yield from ((figure, design) for figure, _, design in rows)
+        """Yield the designs of chains above what was looked at, by figure, cost and names where the order counts."""
+        fresh = np.flatnonzero(paths.figure > looked)
+        rows = (
+            (float(paths.figure[index]), self._design(cell, common, [int(one) for one in paths.switched[index]]))
+            for index in fresh
+        )
+        yield from rows if self._first_only else sorted(rows, key=lambda row: rank_of(*row))
 
     def _design(self, cell: Draft, common: int, switched: list[int]) -> Design:
         shelf, frame = self._bench.shelf, cell.frame
