@@ -1,0 +1,1 @@
+"""A candidate as lines of a bill, with the cautions it earns."""
