@@ -58,31 +58,77 @@ class Judged:
 
 def nodes_of(bench: Bench, pairing: Pairing, *, last: bool) -> Nodes:
     """Return every range that meets the held limits which concern it alone, before the filter is known."""
-    law = pairing.amplifier.law
-    resistors, count = bench.resistors, len(bench.shelf.resistors)
-    common = NO_RESISTOR if law.common_name is None else shaped(resistors, (-1, 1))
-    switched = NO_RESISTOR if law.switched_name is None else shaped(resistors, (1, -1))
-    at = pairing.operate(common, switched, last=last)
-    stands = np.ones((1 if law.common_name is None else count, 1 if law.switched_name is None else count), dtype=bool)
+    grid = Grid.of(bench, pairing, last=last)
     for limit in bench.limits:
         for check in limit.checks:
             if isinstance(check, RangeCheck) and (last or not check.last_only):
-                measure = check.measure(at)
+                measure = check.measure(grid.at)
                 if measure is not None:
-                    stands &= measure.meets
+                    grid = grid.kept(np.atleast_2d(np.asarray(measure.meets, dtype=bool)))
     if not last and bench.ordered:
-        stands &= (at.high_a > bench.conditions.current_min_a) & (at.high_a < bench.conditions.current_max_a)
-    rows, columns = np.nonzero(stands)
-    return _compact(pairing, resistors, rows, columns, last=last)
+        high_a = np.atleast_2d(np.asarray(grid.at.high_a))
+        grid = grid.kept((high_a > bench.conditions.current_min_a) & (high_a < bench.conditions.current_max_a))
+    return grid.nodes()
 
 
-def _compact(pairing: Pairing, resistors: ResistorFigures, rows: Indices, columns: Indices, *, last: bool) -> Nodes:
+@dataclass(frozen=True, slots=True)
+class Grid:
+    """Every choice of common (rows) and switched resistor (columns) that is left, as indices of the resistors.
+
+    A law without one of them has a single row or column of index NONE.
+    """
+
+    pairing: Pairing
+    resistors: ResistorFigures
+    last: bool
+    rows: Indices
+    columns: Indices
+    stands: Truths
+    at: Operating
+
+    @classmethod
+    def of(cls, bench: Bench, pairing: Pairing, *, last: bool) -> Grid:
+        """Return the whole grid."""
+        law, every = pairing.amplifier.law, np.arange(len(bench.shelf.resistors))
+        nothing = np.full(1, NONE)
+        rows = nothing if law.common_name is None else every
+        columns = nothing if law.switched_name is None else every
+        stands = np.ones((len(rows), len(columns)), dtype=bool)
+        return cls(
+            pairing,
+            bench.resistors,
+            last,
+            rows,
+            columns,
+            stands,
+            _on(pairing, bench.resistors, rows, columns, last=last),
+        )
+
+    def kept(self, stands: Truths) -> Grid:
+        """Return the grid with what stands; rows and columns in which nothing does are taken out."""
+        both = self.stands & stands
+        rows, columns = both.any(axis=1), both.any(axis=0)
+        if rows.all() and columns.all():
+            return replace(self, stands=both)
+        left = self.rows[rows], self.columns[columns]
+        at = _on(self.pairing, self.resistors, *left, last=self.last)
+        return replace(self, rows=left[0], columns=left[1], stands=both[np.ix_(rows, columns)], at=at)
+
+    def nodes(self) -> Nodes:
+        """Return what stands, one node each, with the sum that a zero calibration removes."""
+        places = np.nonzero(self.stands)
+        rows, columns = self.rows[places[0]], self.columns[places[1]]
+        common = NO_RESISTOR if self.pairing.amplifier.law.common_name is None else picked(self.resistors, rows)
+        switched = NO_RESISTOR if self.pairing.amplifier.law.switched_name is None else picked(self.resistors, columns)
+        at = zeroed(self.pairing.operate(common, switched, last=self.last))
+        return Nodes(_flattened(at, len(rows)), rows, columns)
+
+
+def _on(pairing: Pairing, resistors: ResistorFigures, rows: Indices, columns: Indices, *, last: bool) -> Operating:
     law = pairing.amplifier.law
-    nothing = np.full(len(rows), NONE)
-    common = NO_RESISTOR if law.common_name is None else picked(resistors, rows)
-    switched = NO_RESISTOR if law.switched_name is None else picked(resistors, columns)
-    at = _flattened(zeroed(pairing.operate(common, switched, last=last)), len(rows))
-    return Nodes(at, nothing if law.common_name is None else rows, nothing if law.switched_name is None else columns)
+    common = NO_RESISTOR if law.common_name is None else shaped(picked(resistors, rows), (-1, 1))
+    switched = NO_RESISTOR if law.switched_name is None else shaped(picked(resistors, columns), (1, -1))
+    return pairing.operate(common, switched, last=last)
 
 
 def _flattened(at: Operating, count: int) -> Operating:

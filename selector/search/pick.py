@@ -2,7 +2,9 @@
 
 from __future__ import annotations
 
+from collections.abc import Hashable
 from dataclasses import fields, is_dataclass
+from functools import cache
 from typing import TypeVar, cast
 
 import numpy as np
@@ -16,17 +18,28 @@ Held = TypeVar("Held")
 Index = NDArray[np.int64] | int
 
 # What all nodes of a frame share is no array: a frame has one shunt, one amplifier and one switch.
-_SHARED = (int, float, str, Conditions, ShuntAt, Window, AmplifierFigures, ShuntFigures, SwitchFigures, LawFigures)
+_SHARED = (Conditions, ShuntAt, Window, AmplifierFigures, ShuntFigures, SwitchFigures, LawFigures)
 
 
 def picked(held: Held, index: Index) -> Held:
     """Return the dataclass with every array of one dimension in it, at any depth, reduced to some elements."""
-    if isinstance(held, np.ndarray):
-        return cast("Held", held[index] if held.ndim == 1 else held)
-    if isinstance(held, _SHARED):
-        return held
-    if isinstance(held, tuple):
-        return cast("Held", tuple(picked(one, index) for one in held))
-    if not is_dataclass(held) or isinstance(held, type):
-        return held
-    return cast("Held", type(held)(*(picked(getattr(held, field.name), index) for field in fields(held))))
+    return cast("Held", _picked(held, index))
+
+
+def _picked(held: object, index: Index) -> object:
+    sort = type(held)
+    if sort is np.ndarray:
+        array = cast("NDArray[np.float64]", held)
+        return array[index] if array.ndim == 1 else array
+    if sort is tuple:
+        return tuple([_picked(one, index) for one in cast("tuple[object, ...]", held)])
+    names = _names(cast("Hashable", sort))
+    return sort(*[_picked(getattr(held, name), index) for name in names]) if names else held
+
+
+@cache
+def _names(sort: Hashable) -> tuple[str, ...]:
+    """Return the fields of a dataclass that may hold arrays, none for anything else."""
+    if not isinstance(sort, type) or issubclass(sort, _SHARED) or not is_dataclass(sort):
+        return ()
+    return tuple(field.name for field in fields(sort))

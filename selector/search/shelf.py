@@ -62,7 +62,7 @@ def shelf_of(spec: Spec, stock: Mapping[str, tuple[Part, ...]]) -> Shelf:
 
 
 def _reason(spec: Spec, conditions: Conditions, part: Part) -> str | None:
-    only = (spec.parts.only or {}).get(part.kind)
+    only = None if spec.parts.only is None else spec.parts.only.get(part.kind)
     if only is not None and part.part not in only:
         return "not in parts.only"
     if part.part in spec.parts.avoid:
