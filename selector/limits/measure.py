@@ -33,11 +33,15 @@ def fits(value: Real, allowed: Real) -> Truth:
 
 @dataclass(frozen=True, slots=True)
 class Measure:
-    """A figure that is to be at most `allowed`; below it where `strict`."""
+    """A figure that is to be at most `allowed`; below it where `strict`.
+
+    `figure` is false where value and allowance only say whether the limit is met.
+    """
 
     value: Real
     allowed: Real
     strict: bool = False
+    figure: bool = True
 
     @property
     def meets(self) -> Truth:
@@ -47,7 +51,7 @@ class Measure:
 
 def flag(*, bad: bool) -> Measure:
     """Return the measure of a limit that is met or not, without a figure."""
-    return Measure(1.0 if bad else 0.0, 0.0)
+    return Measure(1.0 if bad else 0.0, 0.0, figure=False)
 
 
 @dataclass(frozen=True, slots=True)

@@ -99,7 +99,7 @@ def verdict(chain: Chain, limit: Limit) -> Verdict:
     if worst is None:
         return Verdict(limit.name, None, None, None)
     meets, value, allowed = bool(worst.meets), float(worst.value), float(worst.allowed)
-    shown = limit.quantity is not None and abs(value) != float("inf") and abs(allowed) != float("inf")
+    shown = worst.figure and abs(value) != float("inf") and abs(allowed) != float("inf")
     return Verdict(limit.name, meets, value if shown else None, allowed if shown else None)
 
 

@@ -4,6 +4,7 @@ from __future__ import annotations
 
 from collections.abc import Callable, Mapping
 from dataclasses import replace
+from math import isinf
 from time import perf_counter
 
 from selector.candidate import Candidate, Design, Verdict, conditions_of
@@ -103,17 +104,35 @@ def judge(spec: Spec, design: Design, stock: Stock, *, exempt: frozenset[tuple[s
     """
     shelf = shelf_of(spec, stock)
     chain = chain_of(conditions_of(spec), design, exempt)
-    resistors = shelf.resistors if design.filter_resistor is None else (design.filter_resistor,)
-    capacitors = shelf.capacitors if design.filter_capacitor is None else (design.filter_capacitor,)
     failed: str | None = None
-    if chain.ranges and not chain.filtered:
-        bank = bank_of(shelf.conditions, resistors, capacitors, exempt)
-        completed = complete(replace(chain, design=replace(design, filter_resistor=None, filter_capacitor=None)), bank)
+    if not _figures_exist(chain):
+        chain = replace(chain, filtered=False)
+    elif not chain.filtered:
+        completed = _completed(shelf, chain)
         failed = completed if isinstance(completed, str) else None
         chain = chain if isinstance(completed, str) else completed
     verdicts = tuple(_verdicts(chain, failed))
-    candidate = present(chain, score_of(spec)) if chain.ranges and chain.filtered else None
+    candidate = present(chain, score_of(spec)) if chain.filtered else None
     return Judged(candidate, all(one.meets is not False for one in verdicts) and candidate is not None, verdicts)
+
+
+def _figures_exist(chain: Chain) -> bool:
+    """Return whether the parts state what every figure of the filter's place is computed from."""
+    if not chain.ranges or isinf(float(chain.ranges[0].amplifier_pole_hz)):
+        return False
+    capacitor = chain.design.filter_capacitor
+    return capacitor is None or (
+        capacitor.temp_change is not None and capacitor.tolerance + capacitor.temp_change < 1.0
+    )
+
+
+def _completed(shelf: Shelf, chain: Chain) -> Chain | str:
+    """Return the chain with the filter parts that its design leaves open chosen from the shelf."""
+    design = chain.design
+    resistors = shelf.resistors if design.filter_resistor is None else (design.filter_resistor,)
+    capacitors = shelf.capacitors if design.filter_capacitor is None else (design.filter_capacitor,)
+    bank = bank_of(shelf.conditions, resistors, capacitors, chain.exempt)
+    return complete(replace(chain, design=replace(design, filter_resistor=None, filter_capacitor=None)), bank)
 
 
 def _verdicts(chain: Chain, failed: str | None) -> list[Verdict]:

@@ -90,7 +90,9 @@ def _priced(random: Random, rows: list[Fields], kind: str, *, missing: float) ->
     return tuple(read_part(kind, row, where=f"{kind} {row['part']}") for row in rows)
 
 
-def catalogue(seed: int, *, resistors: tuple[int, int] = (2, 6), most: int = 3) -> tuple[Spec, dict[str, tuple[Part, ...]]]:
+def catalogue(
+    seed: int, *, resistors: tuple[int, int] = (2, 6), most: int = 3
+) -> tuple[Spec, dict[str, tuple[Part, ...]]]:
     """Return a spec and a catalogue; `resistors` bounds their number, `most` the number of ranges."""
     random = Random(seed)
     entries = _entries(random, most)

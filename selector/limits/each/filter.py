@@ -4,7 +4,7 @@ from __future__ import annotations
 
 from selector.candidate import Operating
 from selector.limits.capacitor import unfit
-from selector.limits.measure import DesignAt, DesignCheck, FilterCheck, Limit, Measure
+from selector.limits.measure import DesignAt, DesignCheck, FilterCheck, Limit, Measure, flag
 from selector.units import RESISTANCE
 
 
@@ -13,7 +13,7 @@ def _capacitor(at: DesignAt) -> Measure | None:
     capacitor = at.design.filter_capacitor
     if capacitor is None:
         return None
-    return Measure(0.0, 0.0) if unfit(capacitor, at.conditions) is None else Measure(1.0, 0.0)
+    return flag(bad=unfit(capacitor, at.conditions) is not None)
 
 
 def _least(at: Operating) -> Measure:
