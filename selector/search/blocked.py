@@ -13,12 +13,13 @@ from selector.real import Real
 from selector.search.bench import ALL_LIMITS, Bench
 from selector.search.engine import Engine
 from selector.search.found import NothingFits
-from selector.search.frames import every_frame, stands
+from selector.search.frames import EARLY, every_frame, stands
 from selector.search.objective import LargestUse, Score
 from selector.search.present import present
 from selector.search.standing import Standing
 
 FILTER = next(place for place, limit in enumerate(LIMITS) if limit.thins)  # from here on a filter is needed
+LATE = tuple(place for place, limit in enumerate(LIMITS) if not all(isinstance(check, EARLY) for check in limit.checks))
 RANKED = frozenset({"power", "burden", "headroom", "error"})
 
 
@@ -51,25 +52,33 @@ def _furthest(bench: Bench, shunt: Shunt, amplifier: Amplifier) -> int:
     """Return the place of the furthest limit at which a combination of the pair stops.
 
     A combination stops at limit n or later where it meets all limits before n, so the furthest is the last n for
-    which there is one that does; found by halving, the likeliest places first.
+    which there is one that does: found by halving. A limit that needs no resistor stops whole frames, and the
+    furthest of those is known beforehand; no other limit of its sort can be the answer.
     """
-    low, high = 0, _early_stop(bench, shunt, amplifier)
-    guess = high if high < len(LIMITS) - 1 else FILTER
+    early = _early_stop(bench, shunt, amplifier)
+    places = [place for place in LATE if place < early]
+    if early < len(LIMITS):
+        places.append(early)
+    low, high = 0, len(places) - 1
+    guess = high if early < len(LIMITS) else places.index(FILTER)
     while low < high:
-        if _reaches(bench, guess, shunt, amplifier):
+        if _reaches(bench, places[guess], shunt, amplifier):
             low = guess
         else:
             high = guess - 1
-        guess = (low + high + 1) // 2 if low != FILTER else high
-    return low
+        guess = (low + high + 1) // 2 if places[low] != FILTER else high
+    return places[low]
 
 
 def _early_stop(bench: Bench, shunt: Shunt, amplifier: Amplifier) -> int:
-    """Return the place of the furthest limit that stops a frame of the pair before any resistor is chosen."""
+    """Return the place of the furthest limit that stops a frame of the pair before any resistor is chosen.
+
+    The number of limits, where a frame passes them all.
+    """
     furthest = 0
     for frame in every_frame(bench, shunt, amplifier):
         stops = (place for place, limit in enumerate(LIMITS) if not stands(limit, frame.chain))
-        furthest = max(furthest, next(stops, len(LIMITS) - 1))
+        furthest = max(furthest, next(stops, len(LIMITS)))
     return furthest
 
 
