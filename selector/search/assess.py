@@ -4,6 +4,7 @@ from __future__ import annotations
 
 from collections.abc import Iterator
 from dataclasses import replace
+from math import isinf
 
 from selector.budget import combined, zeroed
 from selector.candidate import Conditions, Design, Operating, Pairing, Uses, Verdict, window_of
@@ -91,16 +92,19 @@ def measures(chain: Chain, limit: Limit) -> Iterator[Measure]:
 
 
 def verdict(chain: Chain, limit: Limit) -> Verdict:
-    """Return how a chain stands against a limit: the worst of its measures, None where nothing is to be judged."""
+    """Return how a chain stands against a limit: the worst of its measures, None where nothing is to be judged.
+
+    A limit that a part or the spec does not state allows without end; it is not judged.
+    """
     worst: Measure | None = None
     for measure in measures(chain, limit):
-        if worst is None or _worse(measure, worst):
+        if not isinf(float(measure.allowed)) and (worst is None or _worse(measure, worst)):
             worst = measure
     if worst is None:
         return Verdict(limit.name, None, None, None)
-    meets, value, allowed = bool(worst.meets), float(worst.value), float(worst.allowed)
-    shown = worst.figure and abs(value) != float("inf") and abs(allowed) != float("inf")
-    return Verdict(limit.name, meets, value if shown else None, allowed if shown else None)
+    value, allowed = float(worst.value), float(worst.allowed)
+    shown = worst.figure and not isinf(value)
+    return Verdict(limit.name, bool(worst.meets), value if shown else None, allowed if shown else None)
 
 
 def _worse(measure: Measure, other: Measure) -> bool:
@@ -110,10 +114,8 @@ def _worse(measure: Measure, other: Measure) -> bool:
 
 
 def _shortage(measure: Measure) -> float:
-    allowed = float(measure.allowed)
-    if allowed == 0.0:
-        return float(measure.value)
-    return (float(measure.value) - allowed) / abs(allowed) if abs(allowed) != float("inf") else float("-inf")
+    value, allowed = float(measure.value), float(measure.allowed)
+    return value if allowed == 0.0 else (value - allowed) / abs(allowed)
 
 
 def stopped_at(chain: Chain, bank: FilterBank, lifted: frozenset[str] = frozenset()) -> Chain | str:
