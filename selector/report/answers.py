@@ -3,13 +3,15 @@
 from __future__ import annotations
 
 from dataclasses import dataclass
+from typing import TYPE_CHECKING
 
-from selector.bill.line import Offer
-from selector.parts import Part
-from selector.search import Judged, NothingFits, Searched
-from selector.series import Pair, Preferred
-from selector.spec import Spec
-from selector.units import Quantity
+if TYPE_CHECKING:  # what starts often must not import arrays for the sake of annotations
+    from selector.bill.line import Offer
+    from selector.parts import Part
+    from selector.search import Judged, NothingFits, Searched
+    from selector.series import Pair, Preferred
+    from selector.spec import Spec
+    from selector.units import Quantity
 
 
 @dataclass(frozen=True, slots=True)
@@ -34,17 +36,22 @@ class Checked:
 
 @dataclass(frozen=True, slots=True)
 class BillShown:
-    """Answer of `bill`."""
+    """Answer of `bill`; `in_line` holds the (kind, code) of parts that are in no catalogue, for the TOML of it."""
 
     spec: Spec
     offer: Offer
+    in_line: frozenset[tuple[str, str]] = frozenset()
 
 
 @dataclass(frozen=True, slots=True)
 class PartsListed:
-    """Answer of `parts list` and `parts show`: parts of one or more kinds, in their order."""
+    """Answer of `parts list` and `parts show`: parts of one or more kinds, in their order.
+
+    `csv_text` is the stock file that loads again, printed as it is where the format is csv.
+    """
 
     parts: tuple[Part, ...]
+    csv_text: str | None = None
 
 
 @dataclass(frozen=True, slots=True)
