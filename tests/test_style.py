@@ -22,6 +22,7 @@ MOSTLY = 0.9
 REGISTRIES = (
     ("selector.budget.terms", "TERMS", "TERM"),
     ("selector.limits.each", "LIMITS", "LIMIT"),
+    ("selector.bill.cautions", "CAUTIONS", "CAUTION"),
 )
 PLAIN = (ast.Import, ast.ImportFrom, ast.Assign, ast.AnnAssign)
 

@@ -63,6 +63,7 @@ class Conditions:
     bus_min_v: float
     bus_nominal_v: float
     bus_max_v: float
+    stated_bus_v: float  # the highest bus voltage that the spec states at either side, 0 where it states none
     lead_ohm: float
     output_low_v: float
     output_high_v: float
@@ -169,6 +170,7 @@ def conditions_of(spec: Spec) -> Conditions:
         bus_min_v=_or(spec.sense.bus_min, 0.0) if high_side else 0.0,
         bus_nominal_v=_or(spec.sense.bus_nominal, 0.0) if high_side else 0.0,
         bus_max_v=_or(spec.sense.bus_max, 0.0) if high_side else 0.0,
+        stated_bus_v=_or(spec.sense.bus_max, 0.0),
         lead_ohm=spec.sense.lead,
         output_low_v=spec.output.low,
         output_high_v=_or(spec.output.high, spec.supply.voltage),

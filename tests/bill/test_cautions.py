@@ -94,7 +94,9 @@ def test_voltages_above_the_touch_limits(
     candidate: Candidate, conditions: Conditions, voltages: tuple[float, float], words: str | None, *, two_way: bool
 ) -> None:
     """Above 60 V, or above 30 V where the current flows both ways, the bus or the supply is a hazard to touch."""
-    live = replace(conditions, bus_max_v=voltages[0], supply_v=voltages[1], supply_tolerance_frac=0.0, two_way=two_way)
+    live = replace(
+        conditions, stated_bus_v=voltages[0], supply_v=voltages[1], supply_tolerance_frac=0.0, two_way=two_way
+    )
     texts = said("touch", candidate, live)
     assert [text.startswith(words) for text in texts if words] == ([True] if words else [])
     assert bool(texts) is (words is not None)
@@ -230,7 +232,7 @@ def test_open_joint_is_always_named_and_the_limits_of_figures_come_last(
 
 def test_the_order_is_that_of_the_registry(candidate: Candidate, conditions: Conditions) -> None:
     """Cautions are printed in the order of CAUTIONS, whatever is found."""
-    live = replace(conditions, bus_max_v=400.0)
+    live = replace(conditions, stated_bus_v=400.0)
     texts = cautions_of(with_amplifier(candidate, input_max=None), live)
     starts = [text.split(" ")[0] for text in texts]
     assert starts == ["Touch", "Without", candidate.design.amplifier.part, "Leakage", "Figures"]

@@ -11,8 +11,8 @@ MOST_ALTERNATING_V = 30.0  # the same, r.m.s.
 
 
 def _texts(_candidate: Candidate, conditions: Conditions) -> tuple[str, ...]:
-    """The highest bus or supply above 60 V; above 30 V where the current flows both ways and so may alternate."""
-    highest_v = max(conditions.bus_max_v, conditions.supply_max_v)
+    """Highest bus stated for either side, or the supply, above 60 V; above 30 V where it may alternate (two-way)."""
+    highest_v = max(conditions.stated_bus_v, conditions.supply_max_v)
     if highest_v > MOST_DIRECT_V:
         return (_said(highest_v, "Touch hazard"),)
     if conditions.two_way and highest_v > MOST_ALTERNATING_V:
