@@ -34,7 +34,8 @@ def bandwidth_hz(first_pole_hz: Real, second_pole_hz: Real) -> Real:
 def settling_s(first_pole_hz: Real, second_pole_hz: Real, bits: int) -> Real:
     """Return the time in which two first-order poles settle to half a count of a converter, s.
 
-    ln(2^(bits + 1)) sqrt(1/a^2 + 1/c^2) / (2 pi): exact for one pole; for two, +15 … -1.5 % off the exact time.
+    ln(2^(bits + 1)) sqrt(1/a^2 + 1/c^2) / (2 pi): exact for one pole; for two, +15 … -1.5 % off the exact time from
+    8 to 16 bits, and up to 8 % short of it at 4 bits.
     Source: exponential settling; root sum of squares of time constants, common practice, no source.
     """
     counts = log(2.0) * (bits + 1)

@@ -1,4 +1,4 @@
-"""Current that a network draws from the bus through the shunt."""
+"""Current that a network draws through the shunt, from the bus or from the zero reference."""
 
 from __future__ import annotations
 
@@ -7,8 +7,12 @@ from selector.candidate import Calibration, Operating
 
 
 def _sizes(at: Operating) -> tuple[Size, ...]:
-    """Bus voltage times the conductance of the branch behind the shunt, at the high side."""
-    return (Size(constant_a=at.conditions.common_mode_v * at.law.bus_siemens(at.stage)),)
+    """abs(Vcm - Vz) times the conductance of the branch that hangs on the load's end of the shunt.
+
+    Kirchhoff's laws: that branch lies between the sense line and the zero, at either side; the circuit simulator agrees.
+    """
+    distance_v = abs(at.conditions.common_mode_v - at.conditions.zero_v)
+    return (Size(constant_a=distance_v * at.law.bus_siemens(at.stage)),)
 
 
 TERM = Term("network current", _sizes, removed_by=Calibration.ZERO)
