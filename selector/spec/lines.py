@@ -15,6 +15,8 @@ _SIGN = re.compile(
     re.DOTALL,
 )
 _DEEPEST = 6  # steps of a dotted key that are followed; a spec has three
+_ELEMENT = re.compile(r"\[[0-9]+\]$")
+_LONGEST = 200  # characters of a key that is followed outwards; no key of ours has fifty
 
 
 @dataclass(slots=True)
@@ -109,6 +111,20 @@ def key_lines(text: str) -> dict[str, int]:
         elif kind != "dot" and walk.at_key:
             walk.parts.append(sign[1:-1] if kind == "text" and "." not in sign else sign)
     return walk.lines
+
+
+def outwards(key: str) -> Iterator[str]:
+    """Yield a dotted key, then what it stands in, from the inside out: `a.b[2].c`, `a.b[2]`, `a.b`, `a`.
+
+    A key may be any text; of a long one only the start is followed.
+    """
+    if len(key) > _LONGEST:
+        yield key
+        key = key[:_LONGEST]
+    while key:
+        yield key
+        element = _ELEMENT.search(key)
+        key = key[: element.start()] if element else key.rpartition(".")[0]
 
 
 def _signs(text: str) -> Iterator[tuple[str, str, int]]:

@@ -10,7 +10,7 @@ from pathlib import Path
 
 from selector.errors import Fault, InputRefused
 from selector.spec.judge import flat, judge
-from selector.spec.lines import key_lines
+from selector.spec.lines import key_lines, outwards
 from selector.spec.model import Spec
 from selector.spec.rules import Wrong
 
@@ -18,7 +18,6 @@ LARGEST_FILE = 1_000_000  # bytes
 # A key of so many steps says nothing, and a parser takes time by the square of them.
 _ENDLESS_KEY = re.compile(r"""(?<![\w"'\\-])(?:(?:"(?:[^"\\\n]|\\.)*"|'[^'\n]*'|[\w-]+)[ \t]*\.[ \t]*){30}""")
 _PLACE = re.compile(r" \(at (?:line (\d+), column \d+|end of document)\)$")
-_LAST_STEP = re.compile(r"(\.[^.\[\]]*|\[\d+\]|^[^.]*)$")
 
 
 def load_spec(path: Path, overrides: Mapping[str, str] | None = None, *, kinds: Collection[str] = ()) -> Spec:
@@ -121,16 +120,9 @@ def _in_order(wrong: list[Wrong], file: str, lines: Mapping[str, int], given: Co
 
 def _override(key: str, given: Collection[str]) -> str | None:
     """Return the override that gave a key, or the table or list around it."""
-    return next((name for name in _outwards(key) if name in given), None)
+    return next((name for name in outwards(key) if name in given), None)
 
 
 def _line(key: str, lines: Mapping[str, int]) -> int | None:
     """Return the line of a key, or of the nearest table around it."""
-    return next((lines[name] for name in _outwards(key) if name in lines), None)
-
-
-def _outwards(key: str) -> Iterator[str]:
-    """Yield a key, then what it stands in, from the inside out."""
-    while key:
-        yield key
-        key = _LAST_STEP.sub("", key)
+    return next((lines[name] for name in outwards(key) if name in lines), None)

@@ -2,11 +2,15 @@
 
 from __future__ import annotations
 
-from selector.bill import BillLine, Offer
-from selector.candidate import Candidate, Design, Point
+from typing import TYPE_CHECKING
+
 from selector.parts import Part, columns
 from selector.report.told import Json
 from selector.spec import Spec, entries
+
+if TYPE_CHECKING:  # parts and specs are shown without the arrays that candidates bring along
+    from selector.bill import BillLine, Offer
+    from selector.candidate import Candidate, Design, Point
 
 
 def spec_data(spec: Spec) -> dict[str, Json]:

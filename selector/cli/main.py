@@ -1,0 +1,37 @@
+"""The program's entry: whatever comes, it ends with a status that says what happened, and without a traceback."""
+
+from __future__ import annotations
+
+from selector.cli import signals
+
+
+def main(arguments: list[str] | None = None) -> int:
+    """Run one command and return the exit status.
+
+    Signals are seen to before anything else is imported, streams before anything heavy is.
+    """
+    status, settle = signals.EXIT_INTERRUPTED, None
+    try:
+        signals.watch()
+        from selector.cli import streams  # noqa: PLC0415 - signals are seen to first
+
+        settle = streams.settle
+        streams.prepare()
+        status = _run(arguments)
+    except KeyboardInterrupt:
+        status = signals.EXIT_INTERRUPTED
+    except signals.Ended as ended:
+        status = ended.status
+    signals.ignore()
+    return settle(status) if settle is not None else status
+
+
+def _run(arguments: list[str] | None) -> int:
+    """Run one command."""
+    import os  # noqa: PLC0415 - signals are seen to first
+    import sys  # noqa: PLC0415 - the same
+
+    os.environ.setdefault("OPENBLAS_NUM_THREADS", "1")  # read when numpy starts: more threads only get in the way
+    from selector.cli.run import run  # noqa: PLC0415 - streams are seen to first
+
+    return run(sys.argv[1:] if arguments is None else arguments)
