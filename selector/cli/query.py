@@ -10,6 +10,7 @@ from selector.cli.emit import sink_of
 from selector.cli.options import FormOption, OutputOption, SetOption, SpecPath, VariantsOption, WeightsOption
 from selector.cli.progress import Progress
 from selector.cli.settings import catalogue_of
+from selector.cli.streams import say
 from selector.errors import EXIT_DOES_NOT_MEET, Fault, UsageRefused
 
 TopOption = Annotated[str, typer.Option("--top", metavar="N", help="How many candidates, or: all.")]
@@ -41,6 +42,8 @@ def query(
         listed = answer_query(asked, top=most, catalogue=catalogue, progress=progress)
     sink.answer(listed)
     if not listed.offers:
+        if sink.form == "csv":
+            say(f"Nothing fits; see why: selector query {spec} --format table")
         raise typer.Exit(EXIT_DOES_NOT_MEET)
 
 

@@ -15,7 +15,7 @@ from pathlib import Path
 CHECKOUT = Path(__file__).resolve().parents[2]
 README = CHECKOUT / "README.md"
 BLOCK = re.compile(r"(?<=^```console\n)(.*?)(?=^```$)", re.DOTALL | re.MULTILINE)
-SECONDS = re.compile(r"\b\d+(\.\d+)? s\b(?=$|,| on)", re.MULTILINE)
+SECONDS = re.compile(r"(?<=exact, )\d+(\.\d+)? m?s$", re.MULTILINE)
 
 
 def printed(text: str, folder: Path) -> str:

@@ -7,7 +7,7 @@ import tomllib
 from hypothesis import given
 from hypothesis import strategies as st
 
-from selector.spec.lines import key_lines
+from selector.spec.lines import key_lines, outwards
 
 FORMS = r"""title = '''
 [not.a.table]
@@ -79,3 +79,21 @@ def test_each_key_of_a_plain_table_has_its_own_line(table: dict[str, int]) -> No
     """One key to a line: the n-th key stands on the n-th line."""
     text = "".join(f"{key} = {value}\n" for key, value in table.items())
     assert key_lines(text) == {key: number for number, key in enumerate(table, 1)}
+
+
+def test_a_key_is_followed_outwards_step_by_step() -> None:
+    """Elements of lists, tables and single keys come off one by one; brackets within a name are part of it."""
+    assert list(outwards("accuracy.bands[2].up_to")) == [
+        "accuracy.bands[2].up_to",
+        "accuracy.bands[2]",
+        "accuracy.bands",
+        "accuracy",
+    ]
+    assert list(outwards("limits.a[31m")) == ["limits.a[31m", "limits"]
+    assert list(outwards("x[y")) == ["x[y"]
+
+
+@given(st.text(alphabet="a.[]1\x1b", max_size=400))
+def test_every_key_is_left_behind(key: str) -> None:
+    """Whatever a key holds, the way outwards ends, after no more steps than the key has characters."""
+    assert len(list(outwards(key))) <= len(key)

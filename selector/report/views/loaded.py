@@ -5,7 +5,7 @@ from __future__ import annotations
 from collections.abc import Iterator
 from functools import partial
 
-from selector.report.answers import ColumnRead, FileLoaded, Loaded
+from selector.report.answers import CellRefused, ColumnRead, FileLoaded, Loaded
 from selector.report.document import Block, Column, Document, Lines, Notes, Table
 from selector.report.told import Json, Records, Told
 from selector.report.views.changed import changes_block, changes_data
@@ -74,12 +74,16 @@ def _file(file: FileLoaded, *, dry_run: bool) -> Iterator[Block]:
     counts = ((file.new, "new"), (file.changed, "changed"), (file.same, "same"), (file.refused, "refused"))
     yield Lines((", ".join(f"{number(count)}{would} {what}" for count, what in counts),))
     yield changes_block(file.changes)
-    refused = [
-        f'line {each.line}, {each.column}: "{each.value}": {each.why}' + (f"; {each.remedy}" if each.remedy else "")
-        for each in file.cells
-    ]
-    yield Notes("refused", tuple(refused))
+    yield Notes("refused", tuple(_refused(each) for each in file.cells))
     yield Notes("notes", file.notes)
+
+
+def _refused(cell: CellRefused) -> str:
+    """Return place, value, reason and remedy; the value once, where the reason names it."""
+    place = f"line {cell.line}, {cell.column}" if cell.column else f"line {cell.line}"
+    read = f'"{cell.value}"'
+    said = cell.why if not cell.value or cell.why.startswith(read) else f"{read}: {cell.why}"
+    return f"{place}: {said}; {cell.remedy}" if cell.remedy else f"{place}: {said}"
 
 
 def _column(column: ColumnRead) -> tuple[str, ...]:

@@ -1,0 +1,36 @@
+"""Global options before and behind the command."""
+
+from __future__ import annotations
+
+import pytest
+
+from selector.cli.arguments import command_of, hoisted
+from selector.errors import UsageRefused
+
+
+@pytest.mark.parametrize(
+    ("given", "expected"),
+    [
+        (["query", "s", "--catalogue", "c"], ["--catalogue", "c", "query", "s"]),
+        (["query", "--catalogue=c", "s"], ["--catalogue=c", "query", "s"]),
+        (["query", "--version"], ["--version", "query"]),
+        (["load", "--", "--catalogue"], ["load", "--", "--catalogue"]),
+        (["--catalogue", "--odd", "query"], ["--catalogue", "--odd", "query"]),
+        ([], []),
+    ],
+)
+def test_global_options_come_to_the_front(given: list[str], expected: list[str]) -> None:
+    """`--catalogue` with its path and `--version` move in front of the command, all else keeps its order."""
+    assert hoisted(given) == expected
+
+
+def test_catalogue_needs_its_path() -> None:
+    """`--catalogue` as the last word is wrong usage."""
+    with pytest.raises(UsageRefused, match="no path stands behind it"):
+        hoisted(["query", "--catalogue"])
+
+
+def test_command_is_the_first_word_that_is_no_option() -> None:
+    """The command is found wherever the global options stand."""
+    assert command_of(["query", "s"]) == "query"
+    assert command_of(["--version"]) == ""
