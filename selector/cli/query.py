@@ -6,6 +6,7 @@ from typing import Annotated
 
 import typer
 
+from selector.cli import faults
 from selector.cli.emit import sink_of
 from selector.cli.options import FormOption, OutputOption, SetOption, SpecPath, VariantsOption, WeightsOption
 from selector.cli.progress import Progress
@@ -40,6 +41,9 @@ def query(
     asked = Asked(spec, set_ or (), weights, variants)
     with Progress() as progress:
         listed = answer_query(asked, top=most, catalogue=catalogue, progress=progress)
+    faults.lines(
+        [f'parts.only or parts.avoid names "{code}", which is no part of the catalogue' for code in listed.unknown]
+    )
     sink.answer(listed)
     if not listed.offers:
         if sink.form == "csv":

@@ -16,13 +16,17 @@ if TYPE_CHECKING:  # what starts often must not import arrays for the sake of an
 
 @dataclass(frozen=True, slots=True)
 class Shortlist:
-    """Answer of `query`; `nearest` is the offer of `nothing_fits.nearest`."""
+    """Answer of `query`.
+
+    `nearest` is the offer of `nothing_fits.nearest`; `unknown` holds codes that the spec names and no part has.
+    """
 
     spec: Spec
     offers: tuple[Offer, ...]
     searched: Searched
     nothing_fits: NothingFits | None = None
     nearest: Offer | None = None
+    unknown: tuple[str, ...] = ()
 
 
 @dataclass(frozen=True, slots=True)

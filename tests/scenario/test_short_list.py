@@ -53,6 +53,13 @@ def test_check_repeats_the_figures_of_query_exactly(run: Run, tmp_path: Path) ->
         (tmp_path / "design.toml").unlink()
 
 
+def test_code_that_no_part_has_is_told(run: Run) -> None:
+    """A code in `parts.avoid` that the catalogue does not know is told, since it avoids nothing; the answer stands."""
+    done = run("query", PUMP, "--set", 'parts.avoid=["S-0R005", "S-0R00S"]', "--top", 1)
+    assert done.returncode == 0
+    assert done.stderr == 'parts.only or parts.avoid names "S-0R00S", which is no part of the catalogue\n'
+
+
 def test_top_and_variants(run: Run) -> None:
     """`--top` takes that many or all, and with `--variants` a pair may stand in the list more than once."""
     one, every = (answer(run, "query", PUMP, "--top", top)["candidates"] for top in ("1", "all"))

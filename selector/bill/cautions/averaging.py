@@ -14,12 +14,11 @@ def _texts(candidate: Candidate, conditions: Conditions) -> tuple[str, ...]:
     taken_s = conditions.average / slowest_hz
     if taken_s * conditions.bandwidth_hz <= 1.0:
         return ()
-    return (
-        (
-            f"Averaging {shown(conditions.average, COUNT)} readings takes {shown(taken_s, TIME)}: the averaged reading "
-            f"no longer follows {shown(conditions.bandwidth_hz, FREQUENCY)}."
-        ),
-    )
+    time, bandwidth = shown(taken_s, TIME), shown(conditions.bandwidth_hz, FREQUENCY)
+    if conditions.average == 1:
+        return (f"One reading takes {time}: it does not follow {bandwidth}.",)
+    count = shown(conditions.average, COUNT)
+    return (f"Averaging {count} readings takes {time}: the averaged reading no longer follows {bandwidth}.",)
 
 
 CAUTION = Caution("averaging", _texts)
