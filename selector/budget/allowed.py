@@ -31,10 +31,11 @@ def breaks(conditions: Conditions) -> Iterator[tuple[float, Band, Band]]:
 
 def judged(conditions: Conditions, low_a: float, high_a: float) -> tuple[tuple[float, float], ...]:
     """Return (current, allowed error) in A at every judged current of a range, by current, the lower band first."""
-    points = {(low_a, allowed_at(conditions, low_a)): None}
+    points = [(low_a, allowed_at(conditions, low_a))]
     for at_a, below, above in breaks(conditions):
+        if low_a < at_a < high_a:
+            points.append((at_a, allowed_a(below, at_a)))
         if low_a <= at_a < high_a:
-            points[(at_a, allowed_a(below, at_a))] = None
-            points[(at_a, allowed_a(above, at_a))] = None
-    points[(high_a, allowed_at(conditions, high_a))] = None
+            points.append((at_a, allowed_a(above, at_a)))
+    points.append((high_a, allowed_at(conditions, high_a)))
     return tuple((float(current), float(allowed)) for current, allowed in points)

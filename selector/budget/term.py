@@ -38,7 +38,7 @@ class Term:
     `sizes` gives one Size per independent cause: two resistors give two, which add up in the worst case and
     add in squares in a root sum of squares. `removed_by` is the least calibration that takes the term out, and
     `removable` is 1 where it does so for this design, 0 where it cannot. A term is rectangular within its limit;
-    a `normal` one states its standard deviation.
+    a `normal` one states its standard deviation. A `leakage` is a current that doubles every few kelvin.
     """
 
     name: str
@@ -46,6 +46,7 @@ class Term:
     removed_by: Calibration | None = None
     removable: Callable[[Operating], Real] = _always
     normal: bool = False
+    leakage: bool = False
 
     def removed(self, at: Operating) -> Real:
         """Return 1 where the calibration in use takes the term out, else 0."""

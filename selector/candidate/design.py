@@ -86,6 +86,11 @@ class Design:
         )
 
 
+def in_stock(part: Part) -> int:
+    """Return the pieces of a part in stock; a generic part never counts as stock, nor does one that states none."""
+    return 0 if part.generic else part.quantity or 0
+
+
 def cost_of(design: Design) -> float | None:
     """Return the cost of one board's parts, or None where a part states none.
 

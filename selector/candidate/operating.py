@@ -66,7 +66,6 @@ class FilterAt:
     ohm: Real
     slow_hz: Real
     noisy_hz: Real
-    most_ohm: Real = 0.0
     least_ohm: Real = 0.0
 
 
@@ -163,7 +162,7 @@ class Operating:
         least_ohm = figures.ohm * (1.0 - figures.tolerance_frac)
         slow = corner_hz(most_ohm + self.output_ohm, figures.farad * (1.0 + figures.farad_tolerance_frac))
         noisy = corner_hz(least_ohm + self.output_ohm, figures.farad * (1.0 - figures.farad_tolerance_frac))
-        return replace(self, filter=FilterAt(figures.ohm, slow, noisy, most_ohm, least_ohm))
+        return replace(self, filter=FilterAt(figures.ohm, slow, noisy, least_ohm))
 
     @property
     def low_a(self) -> Real:

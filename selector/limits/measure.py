@@ -4,7 +4,7 @@ from __future__ import annotations
 
 from collections.abc import Callable
 from dataclasses import dataclass
-from math import inf
+from math import isfinite
 
 import numpy as np
 
@@ -19,16 +19,19 @@ TOLERANCE = 1e-12  # relative, so that a figure on its limit meets it whatever t
 
 
 def fits(value: Real, allowed: Real) -> Truth:
-    """Return whether value <= allowed, to 1e-12 of the larger of both.
+    """Return whether value <= allowed, to 1e-12 of the larger of both; what is infinite is compared as it stands.
 
     >>> fits(0.1 + 0.2, 0.3)
     True
     """
     if isinstance(value, float) and isinstance(allowed, float):
-        return value <= allowed or (allowed > -inf and value - allowed <= TOLERANCE * max(abs(value), abs(allowed)))
+        finite = isfinite(value) and isfinite(allowed)
+        return value <= allowed or (finite and value - allowed <= TOLERANCE * max(abs(value), abs(allowed)))
     value, allowed = np.asarray(value), np.asarray(allowed)
-    near = value - allowed <= TOLERANCE * np.maximum(np.abs(value), np.abs(allowed))
-    return np.asarray((value <= allowed) | near)
+    both = np.isfinite(value) & np.isfinite(allowed)
+    over = np.subtract(value, allowed, where=both, out=np.full(both.shape, np.inf))
+    near = over <= TOLERANCE * np.maximum(np.abs(value), np.abs(allowed))
+    return np.asarray((value <= allowed) | (both & near))
 
 
 @dataclass(frozen=True, slots=True)
@@ -212,10 +215,12 @@ Check = (
 class Limit:
     """A limit that a combination must meet; `quantity` is None where there is no figure to show.
 
-    `thins` marks the limits that thin the choice of an output filter, in their order.
+    `thins` marks the limits that thin the choice of an output filter, in their order; `ranked` those whose use a
+    score weighs.
     """
 
     name: str
     checks: tuple[Check, ...]
     quantity: Quantity | None
     thins: bool = False
+    ranked: bool = False

@@ -49,9 +49,16 @@ def chain_of(conditions: Conditions, design: Design, exempt: frozenset[tuple[str
     if pairing.window.span_v <= 0.0:
         return chain
     chain = replace(chain, ranges=_ranges(design, pairing))
-    if design.filter_resistor is not None and design.filter_capacitor is not None:
-        return _filtered(chain, design)
-    return chain
+    given = design.filter_resistor is not None and design.filter_capacitor is not None
+    return _filtered(chain, design) if given and spread_is_known(design) else chain
+
+
+def spread_is_known(design: Design) -> bool:
+    """Return whether the filter's capacitor, where there is one, states how far it may be off, and by less than all."""
+    capacitor = design.filter_capacitor
+    return capacitor is None or (
+        capacitor.temp_change is not None and capacitor.tolerance + capacitor.temp_change < 1.0
+    )
 
 
 def _ranges(design: Design, pairing: Pairing) -> tuple[Operating, ...]:

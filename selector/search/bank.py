@@ -9,13 +9,12 @@ import numpy as np
 from numpy.typing import NDArray
 
 from selector.candidate import Conditions, Design, Operating, cost_of
+from selector.candidate.design import in_stock
 from selector.candidate.figures import FilterFigures, filter_figures, stacked
 from selector.limits import LIMITS, FilterCheck
 from selector.limits.measure import ChoiceAt, ChoiceCheck
 from selector.parts import Capacitor, Resistor
-from selector.search.order import cost_key, rounded
-
-NEARLY = 1.0 + 1e-11  # corners this close are compared digit by digit
+from selector.search.order import NEARLY, cost_key, rounded
 
 
 @dataclass(frozen=True, slots=True)
@@ -126,7 +125,7 @@ def _rows(codes: list[str]) -> dict[str, NDArray[np.int64]]:
 
 
 def _held(part: Resistor | Capacitor, exempt: frozenset[tuple[str, str]]) -> float:
-    return float("inf") if (part.kind, part.part) in exempt else float(part.quantity or 0)
+    return float("inf") if (part.kind, part.part) in exempt else float(in_stock(part))
 
 
 def _cost(part: Resistor | Capacitor) -> float:

@@ -2,6 +2,7 @@
 
 from __future__ import annotations
 
+from collections import Counter
 from dataclasses import dataclass, field
 from functools import cached_property
 
@@ -9,7 +10,7 @@ import numpy as np
 from numpy.typing import NDArray
 
 from selector.candidate import Conditions
-from selector.candidate.figures import NO_RESISTOR, ResistorFigures, resistor_figures, stacked
+from selector.candidate.figures import ResistorFigures, resistor_figures, stacked
 from selector.limits import LIMITS, FilterCheck, Limit, PointCheck
 from selector.limits.each.range_order import LIMIT as RANGE_ORDER
 from selector.search.bank import FilterBank, bank_of
@@ -30,6 +31,7 @@ class Bench:
     resistors: ResistorFigures
     objective: Objective
     held: frozenset[str] = ALL_LIMITS
+    counts: Counter[str] = field(default_factory=Counter, compare=False)  # what was done, over all searches of a bench
     stand_ins: dict[tuple[object, ...], StandIn | None] = field(
         default_factory=dict, compare=False
     )  # many frames share
@@ -81,6 +83,6 @@ def bench_of(shelf: Shelf, objective: Objective) -> Bench:
     return Bench(
         shelf,
         bank_of(shelf.conditions, shelf.resistors, shelf.capacitors),
-        stacked(resistors) if resistors else NO_RESISTOR,
+        stacked(resistors) if resistors else ResistorFigures(*[np.empty(0)] * 3),
         objective,
     )

@@ -6,7 +6,6 @@ from collections import Counter
 from collections.abc import Callable
 from dataclasses import dataclass, replace
 
-from selector.candidate.elementwise import chosen
 from selector.limits import LIMITS
 from selector.parts import Amplifier, Shunt
 from selector.real import Real
@@ -20,16 +19,18 @@ from selector.search.standing import Standing
 
 FILTER = next(place for place, limit in enumerate(LIMITS) if limit.thins)  # from here on a filter is needed
 LATE = tuple(place for place, limit in enumerate(LIMITS) if not all(isinstance(check, EARLY) for check in limit.checks))
-RANKED = frozenset({"power", "burden", "headroom", "error"})
+PASSED = len(LIMITS)  # the place of what meets every limit
+RANKED = frozenset(limit.name for limit in LIMITS if limit.ranked)
 
 
 @dataclass(frozen=True, slots=True)
 class Anything:
-    """No figure at all: whatever meets the limits will do."""
+    """No figure at all: whatever meets the limits will do, and stands at 0."""
 
     def of(self, power: Real, burden: Real, headroom: Real, error: Real) -> Real:
-        """Return 0."""
-        return chosen(error < 0.0, power + burden + headroom, 0.0)
+        """Return 0 in the shape of the uses; the error is left out, since it may be infinite."""
+        del error
+        return 0.0 * (power + burden + headroom)
 
 
 def nothing_fits(
@@ -52,15 +53,15 @@ def _furthest(bench: Bench, shunt: Shunt, amplifier: Amplifier) -> int:
     """Return the place of the furthest limit at which a combination of the pair stops.
 
     A combination stops at limit n or later where it meets all limits before n, so the furthest is the last n for
-    which there is one that does: found by halving. A limit that needs no resistor stops whole frames, and the
-    furthest of those is known beforehand; no other limit of its sort can be the answer.
+    which there is one that does: found by halving. The answer is a limit that a frame stops at before any resistor
+    is chosen, or one that needs more than the frame. A pair without any combination, for want of resistors, counts at
+    the first of these.
     """
-    early = _early_stop(bench, shunt, amplifier)
-    places = [place for place in LATE if place < early]
-    if early < len(LIMITS):
-        places.append(early)
+    stops = _early_stops(bench, shunt, amplifier)
+    early = max(stops)
+    places = sorted({place for place in LATE if place < early} | (stops - {PASSED}))
     low, high = 0, len(places) - 1
-    guess = high if early < len(LIMITS) else places.index(FILTER)
+    guess = places.index(FILTER) if early == PASSED else high
     while low < high:
         if _reaches(bench, places[guess], shunt, amplifier):
             low = guess
@@ -70,16 +71,12 @@ def _furthest(bench: Bench, shunt: Shunt, amplifier: Amplifier) -> int:
     return places[low]
 
 
-def _early_stop(bench: Bench, shunt: Shunt, amplifier: Amplifier) -> int:
-    """Return the place of the furthest limit that stops a frame of the pair before any resistor is chosen.
-
-    The number of limits, where a frame passes them all.
-    """
-    furthest = 0
-    for frame in every_frame(bench, shunt, amplifier):
-        stops = (place for place, limit in enumerate(LIMITS) if not stands(limit, frame.chain))
-        furthest = max(furthest, next(stops, len(LIMITS)))
-    return furthest
+def _early_stops(bench: Bench, shunt: Shunt, amplifier: Amplifier) -> set[int]:
+    """Return the places at which frames of the pair stop before any resistor is chosen; PASSED for one that passes."""
+    return {
+        next((place for place, limit in enumerate(LIMITS) if not stands(limit, frame.chain)), PASSED)
+        for frame in every_frame(bench, shunt, amplifier)
+    }
 
 
 def _reaches(bench: Bench, place: int, shunt: Shunt, amplifier: Amplifier) -> bool:

@@ -9,6 +9,7 @@ from math import ceil, inf, isfinite
 import numpy as np
 
 from selector.candidate import Operating
+from selector.candidate.design import in_stock
 from selector.parts import Part
 from selector.search.bench import Bench
 from selector.search.drafts import Draft, Thread, layered
@@ -69,7 +70,7 @@ def _settled(bench: Bench, frame: Frame, place: int) -> bool:
     resistor, capacitor = bench.bank.pairs[place]
     law = frame.pairing.amplifier.law
     most_uses = law.copies * (frame.range_count + 1)
-    if conditions.stock_only and (resistor.quantity or 0) < conditions.boards * (1 + most_uses):
+    if conditions.stock_only and in_stock(resistor) < conditions.boards * (1 + most_uses):
         return False
     if bench.lifted and isfinite(conditions.settle_s):
         return False

@@ -9,6 +9,7 @@ the arrays that found them.
 from __future__ import annotations
 
 import heapq
+from collections import Counter
 from collections.abc import Callable, Iterator
 from dataclasses import dataclass, replace
 from itertools import count
@@ -27,12 +28,13 @@ from selector.search.drafts import Draft, draft_of
 from selector.search.frames import Frame, frames_of
 from selector.search.layers import Layers, Paths
 from selector.search.nodes import NONE
-from selector.search.order import rounded
+from selector.search.order import NEARLY, rounded
 from selector.search.standing import PairKey, Standing, rank_of
 
-NEARLY = 1.0 + 1e-11  # arrays and plain numbers agree far closer than this
 ROUNDING = 1e-13  # how far a figure of the arrays may be from the plain one, relative
 STEPS = (1.0, 1.0005, 1.002, 1.01, 1.05, 1.25)  # how far above its best chain a common resistor is looked into
+
+EVALUATED = "evaluated"  # combinations judged in full
 
 Progress = Callable[[int, int], None]
 
@@ -57,7 +59,6 @@ class Engine:
 
     def __init__(self, bench: Bench, standing: Standing, progress: Progress | None = None) -> None:
         """Set up a search that fills a list."""
-        self.evaluated = 0
         self._bench = bench
         self._standing = standing
         self._progress = progress
@@ -71,14 +72,15 @@ class Engine:
         for shunt, amplifier in pairs:
             for frame in frames_of(self._bench, shunt, amplifier):
                 self._push(self._idle(frame), Piece((shunt.part, amplifier.part), frame))
-        done, total = 0, len(self._queue)
+        waiting = Counter(piece.pair for _, _, piece in self._queue)
+        total = len(waiting)
         while self._queue:
             bound, _, piece = heapq.heappop(self._queue)
             if bound <= self._most(piece.pair):
                 self._advance(piece)
             if piece.draft is None and self._progress is not None:
-                done += 1
-                self._progress(done, total)
+                waiting[piece.pair] -= 1
+                self._progress(sum(1 for frames in waiting.values() if not frames), total)
             if self._found():
                 return
 
@@ -159,7 +161,7 @@ class Engine:
     def _judge(self, piece: Piece, figure: float, design: Design) -> None:
         if piece.cell is None or self._hopeless(piece.pair, figure, design, exact=piece.cell.filter is not None):
             return
-        self.evaluated += 1
+        self._bench.counts[EVALUATED] += 1
         open_design = replace(design, filter_resistor=None, filter_capacitor=None)
         chain = stopped_at(chain_of(self._bench.conditions, open_design), self._bench.bank, self._bench.lifted)
         if isinstance(chain, str):

@@ -90,7 +90,6 @@ def stand_in(bench: Bench, pairing: Pairing, *, last: bool) -> StandIn | None:
             ohm=_least(at.filter.ohm, serves),
             slow_hz=-_least(-1.0 * at.filter.slow_hz, serves),
             noisy_hz=_least(at.filter.noisy_hz, serves),
-            most_ohm=-_least(-1.0 * at.filter.most_ohm, serves),
             least_ohm=-_least(-1.0 * at.filter.least_ohm, serves),
         ),
         np.asarray(serves.any(axis=1)),

@@ -11,16 +11,16 @@ from selector.candidate import Candidate, Design, Verdict, conditions_of
 from selector.candidate.chain import Chain
 from selector.limits import LIMITS
 from selector.parts import Part
-from selector.search.assess import chain_of, complete, verdict
+from selector.search.assess import chain_of, complete, spread_is_known, verdict
 from selector.search.bank import bank_of
 from selector.search.bench import Bench, bench_of
 from selector.search.blocked import nothing_fits
-from selector.search.engine import Engine
+from selector.search.engine import EVALUATED, Engine
 from selector.search.found import Found, Judged, Searched
 from selector.search.objective import score_of
 from selector.search.order import rounded
 from selector.search.present import present
-from selector.search.shelf import Shelf, shelf_of
+from selector.search.shelf import Shelf, in_one_currency, shelf_of
 from selector.search.standing import Standing
 from selector.spec import Spec
 
@@ -38,18 +38,20 @@ def search(
     """Return the exact short list: what judging every combination would put first.
 
     The best combination of each (shunt, amplifier) pair, or every one with `variants`; `top` of them, None for all.
-    `progress` is called with the pairs done and their number.
+    `progress` is called with the pairs done and their number. Raises ValueError for a `top` below 1.
     """
+    if top is not None and top < 1:
+        message = f"top is {top}; a list has at least 1 place"
+        raise ValueError(message)
     started = perf_counter()
     score = score_of(spec)
     bench = bench_of(shelf_of(spec, stock), score)
     pairs = [(shunt, amplifier) for shunt in bench.shelf.shunts for amplifier in bench.shelf.amplifiers]
     standing = Standing(top, variants)
-    engine = Engine(bench, standing, progress)
-    engine.run(pairs)
+    Engine(bench, standing, progress).run(pairs)
     candidates = tuple(present(placed.chain, score) for placed in standing.best())
     empty = None if candidates else nothing_fits(bench, score, pairs, progress)
-    searched = _searched(bench, engine.evaluated, perf_counter() - started)
+    searched = _searched(bench, bench.counts[EVALUATED], perf_counter() - started)
     return Found(_ranked(candidates), searched, empty)
 
 
@@ -103,7 +105,7 @@ def judge(spec: Spec, design: Design, stock: Stock, *, exempt: frozenset[tuple[s
     A filter part that the design leaves open is chosen from the stock as the search chooses it.
     """
     shelf = shelf_of(spec, stock)
-    chain = chain_of(conditions_of(spec), design, exempt)
+    chain = chain_of(conditions_of(spec), in_one_currency(design, stock), exempt)
     failed: str | None = None
     if not _figures_exist(chain):
         chain = replace(chain, filtered=False)
@@ -118,12 +120,8 @@ def judge(spec: Spec, design: Design, stock: Stock, *, exempt: frozenset[tuple[s
 
 def _figures_exist(chain: Chain) -> bool:
     """Return whether the parts state what every figure of the filter's place is computed from."""
-    if not chain.ranges or isinf(float(chain.ranges[0].amplifier_pole_hz)):
-        return False
-    capacitor = chain.design.filter_capacitor
-    return capacitor is None or (
-        capacitor.temp_change is not None and capacitor.tolerance + capacitor.temp_change < 1.0
-    )
+    speed_is_known = bool(chain.ranges) and not isinf(float(chain.ranges[0].amplifier_pole_hz))
+    return speed_is_known and spread_is_known(chain.design)
 
 
 def _completed(shelf: Shelf, chain: Chain) -> Chain | str:

@@ -4,10 +4,11 @@ from __future__ import annotations
 
 from collections import Counter
 from collections.abc import Iterable, Mapping
-from dataclasses import dataclass
+from dataclasses import dataclass, replace
 from typing import TypeVar
 
-from selector.candidate import Conditions, conditions_of
+from selector.candidate import Conditions, Design, conditions_of
+from selector.candidate.design import in_stock
 from selector.limits import unfit
 from selector.parts import Amplifier, Bypass, Capacitor, Part, Resistor, Shunt, Switch
 from selector.search.found import LeftOut
@@ -67,18 +68,39 @@ def _reason(spec: Spec, conditions: Conditions, part: Part) -> str | None:
         return "not in parts.only"
     if part.part in spec.parts.avoid:
         return "in parts.avoid"
-    if conditions.stock_only and (part.generic or (part.quantity or 0) < conditions.boards):
-        return "not in stock"
+    if conditions.stock_only and in_stock(part) < conditions.boards:
+        return "too few in stock" if in_stock(part) else "not in stock"
     return unfit(part, conditions) if isinstance(part, Capacitor) else None
 
 
+def in_one_currency(design: Design, stock: Mapping[str, tuple[Part, ...]]) -> Design:
+    """Return a design whose parts have no costs where they and the catalogue's have them in several currencies."""
+    parts = [place.part for place in design.places()]
+    if len(_currencies([parts, *stock.values()])) <= 1:
+        return design
+    return replace(
+        design,
+        shunts=tuple(_unpriced(shunt) for shunt in design.shunts),
+        amplifier=_unpriced(design.amplifier),
+        switch=design.switch and _unpriced(design.switch),
+        common=design.common and _unpriced(design.common),
+        gain=design.gain and tuple(_unpriced(resistor) for resistor in design.gain),
+        filter_resistor=design.filter_resistor and _unpriced(design.filter_resistor),
+        filter_capacitor=design.filter_capacitor and _unpriced(design.filter_capacitor),
+    )
+
+
 def _priced(stock: Mapping[str, tuple[Part, ...]]) -> Mapping[str, Iterable[Part]]:
-    currencies = {
-        part.currency
-        for parts in stock.values()
-        for part in parts
-        if part.unit_cost is not None and part.currency is not None
-    }
-    if len(currencies) <= 1:
+    if len(_currencies(stock.values())) <= 1:
         return stock
-    return {kind: [part.model_copy(update={"unit_cost": None}) for part in parts] for kind, parts in stock.items()}
+    return {kind: [_unpriced(part) for part in parts] for kind, parts in stock.items()}
+
+
+def _currencies(stock: Iterable[Iterable[Part]]) -> set[str]:
+    """Return the currencies that costs are stated in."""
+    priced = (part for parts in stock for part in parts if part.unit_cost is not None)
+    return {part.currency for part in priced if part.currency is not None}
+
+
+def _unpriced(part: Kind) -> Kind:
+    return part.model_copy(update={"unit_cost": None})

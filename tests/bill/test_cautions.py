@@ -182,6 +182,9 @@ def test_an_averaged_reading_that_no_longer_follows(candidate: Candidate, condit
     assert said("averaging", candidate, replace(conditions, average=2.0, bandwidth_hz=251.0)) == (
         "Averaging 2 readings takes 4 ms: the averaged reading no longer follows 251 Hz.",
     )
+    assert said("averaging", candidate, replace(conditions, average=1.0, bandwidth_hz=501.0)) == (
+        "One reading takes 2 ms: it does not follow 501 Hz.",
+    )
 
 
 def test_the_slowest_corner_is_that_of_the_range_with_most_resistance(

@@ -35,6 +35,16 @@ def test_network_current() -> None:
     check("network current", operating(OF, accuracy__calibration="zero", **HIGH_SIDE))
 
 
+def test_network_current_against_a_zero() -> None:
+    """The branch ends at the zero: 9.6 V over 21 kohm at the high side, 2.4 V at the low side.
+
+    Source: Kirchhoff's laws; the branch at the load's end of the shunt lies between sense line and zero.
+    Tolerance: 1e-12, rounding.
+    """
+    check("network current", operating(OF, **HIGH_SIDE, **VZ), constant=9.6 / 21e3)
+    check("network current", operating(OF, **VZ), constant=2.4 / 21e3)
+
+
 def test_network_mismatch() -> None:
     """12 V * 0.006 / 21 over 0.1 ohm are 34.286 mA; against a zero of 2.4 V 27.429 mA; zero takes it out."""
     check("network mismatch", operating(OF, **HIGH_SIDE), constant=0.072 / 2.1)

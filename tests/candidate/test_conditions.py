@@ -7,7 +7,7 @@ from math import inf
 import pytest
 
 from selector.candidate import Calibration
-from tests.builders import HIGH_SIDE, conditions, near
+from tests.builders import HIGH_SIDE, ZERO, conditions, near
 
 
 def test_supply_at_both_ends() -> None:
@@ -80,3 +80,58 @@ def test_calibrations() -> None:
     taken = {one.value: (one.zero, one.span) for one in Calibration}
     assert taken == {"none": (False, False), "zero": (True, False), "zero-and-span": (True, True)}
     assert conditions(accuracy__calibration="zero").calibration is Calibration.ZERO
+
+
+def test_stock_and_boards() -> None:
+    """Only with parts.from = "stock", the default, does the stock count."""
+    assert not conditions().stock_only
+    assert conditions(parts__from="stock", parts__boards=3).stock_only
+    assert conditions(parts__from=None).stock_only
+    assert conditions(parts__boards=3).boards == 3
+
+
+# Entry, its value, and the attribute that holds it.
+PLAIN: list[tuple[str, object, str]] = [
+    ("current__two_way", True, "two_way"),
+    ("current__min", 0.2, "current_min_a"),
+    ("current__max", 2.0, "current_max_a"),
+    ("accuracy__method", "rss", "method"),
+    ("accuracy__coverage", 3.0, "coverage"),
+    ("accuracy__calibration_uncertainty", 0.002, "calibration_uncertainty_frac"),
+    ("limits__burden", 0.3, "burden_limit_v"),
+    ("limits__power", 0.4, "power_limit_w"),
+    ("limits__headroom", 0.1, "headroom_limit_frac"),
+    ("limits__cost", 5.0, "cost_limit"),
+    ("limits__load_fraction", 0.7, "load_frac"),
+    ("sense__lead", 0.01, "lead_ohm"),
+    ("output__low", 0.2, "output_low_v"),
+    ("output__zero_tolerance", 0.003, "zero_tolerance_frac"),
+    ("output__zero_drift", 2e-5, "zero_drift_per_k"),
+    ("converter__bits", 12, "bits"),
+    ("converter__reference", 3.0, "reference_v"),
+    ("converter__reference_tolerance", 0.004, "reference_tolerance_frac"),
+    ("converter__reference_drift", 3e-5, "reference_drift_per_k"),
+    ("converter__offset", 1e-3, "converter_offset_v"),
+    ("converter__inl", 1.5, "converter_inl_lsb"),
+    ("converter__gain_error", 0.005, "converter_gain_error_frac"),
+    ("converter__noise", 1e-4, "converter_noise_v"),
+    ("converter__input_current", 1e-8, "converter_input_current_a"),
+    ("converter__input_resistance", 1e6, "converter_input_ohm"),
+    ("converter__input_max", 3.6, "converter_input_max_v"),
+    ("converter__clamp_current", 1e-3, "clamp_current_a"),
+    ("converter__average", 8, "average"),
+    ("ambient__gradient", 2.0, "gradient_k"),
+    ("signal__bandwidth", 200.0, "bandwidth_hz"),
+    ("signal__settle", 0.01, "settle_s"),
+    ("ranges__most", 3, "ranges_most"),
+    ("ranges__overlap", 0.2, "overlap_frac"),
+    ("filter__resistance_min", 20.0, "filter_least_ohm"),
+    ("filter__resistance_max", 5e3, "filter_most_ohm"),
+]
+
+
+@pytest.mark.parametrize(("entry", "value", "held"), PLAIN)
+def test_entry_is_held_as_stated(entry: str, value: object, held: str) -> None:
+    """Each entry of the spec reaches the formulas unchanged, and what the plain spec has is not that value."""
+    assert getattr(conditions(**ZERO | {entry: value}), held) == value
+    assert getattr(conditions(**ZERO), held) != value

@@ -2,7 +2,13 @@
 
 from __future__ import annotations
 
-from selector.search import search
+from dataclasses import replace
+
+import pytest
+
+from selector.gain import LAWS
+from selector.parts import Shunt
+from selector.search import judge, search
 from selector.search.order import cost_key, rounded
 from tests.search.small import capacitor, part, resistor, spec, stock
 
@@ -78,7 +84,8 @@ def test_narrowing_is_counted() -> None:
     assert reasons == {
         ("shunt", "in parts.avoid"): 1,
         ("shunt", "not in parts.only"): 1,
-        ("shunt", "not in stock"): 2,
+        ("shunt", "not in stock"): 1,
+        ("shunt", "too few in stock"): 1,
     }
 
 
@@ -103,3 +110,61 @@ def test_empty_catalogue_fits_nothing() -> None:
     assert found.candidates == ()
     assert found.nothing_fits is not None
     assert (found.nothing_fits.pairs, found.nothing_fits.blocked, found.nothing_fits.nearest) == (0, (), None)
+
+
+@pytest.mark.parametrize("law", list(LAWS))
+def test_empty_shelves_are_answered(law: str) -> None:
+    """Without resistors, capacitors or both nothing fits, whatever the law, and the counts sum to the pairs."""
+    fields = {
+        "one-resistor": {"gain_resistance": 1e5},
+        "two-resistor": {"gain_factor": 2.0},
+        "current-output": {"transconductance": 2e-4},
+    }.get(law, {})
+    gain = 20.0 if law == "fixed" else None
+    amplifier = part("amplifier", gain_law=law, gain=gain, **fields)
+    switch = {"on_resistance": 1.0, "on_resistance_spread": 0.5, "leakage": 1e-9, "channels": 2}
+    rest = (amplifier, part("switch", part="W", supply_min=1.8, supply_max=5.5, **switch))
+    for parts in ((), (capacitor("C", 1e-7),), (resistor("R", 1e3),)):
+        found = search(spec(ranges__most=2), stock(*rest, *parts))
+        assert found.candidates == ()
+        assert found.nothing_fits is not None
+        assert sum(count for _, count in found.nothing_fits.blocked) == found.nothing_fits.pairs == 1
+
+
+def test_unknown_cost_does_not_meet_a_limit() -> None:
+    """A part without a cost is out where limits.cost is stated: physics 4, null: out."""
+    priced = [part("amplifier", unit_cost=1.0), resistor("R", 1e3, unit_cost=0.1), capacitor("C", 1e-7, unit_cost=0.1)]
+    shunts = (part("shunt", part="S1"), part("shunt", part="S2", unit_cost=0.5))
+    found = search(spec(limits__cost=5.0), stock(*shunts, *priced))
+    assert [one.design.shunts[0].part for one in found.candidates] == ["S2"]
+
+
+def test_design_in_two_currencies_has_no_cost() -> None:
+    """Costs in more than one currency are no costs when a design is judged, either."""
+    rows = stock(
+        part("shunt", unit_cost=1.0, currency="EUR"),
+        part("amplifier", unit_cost=1.0, currency="EUR"),
+        resistor("R", 1e3, unit_cost=0.1, currency="EUR"),
+        capacitor("C", 1e-7, unit_cost=0.1, currency="EUR"),
+    )
+    design = search(spec(), rows).candidates[0].design
+    foreign = part("shunt", unit_cost=1.0, currency="CHF")
+    assert isinstance(foreign, Shunt)
+    judged = judge(spec(limits__cost=9.0), replace(design, shunts=(foreign,)), rows)
+    assert judged.candidate is not None
+    assert judged.candidate.cost is None
+    assert not judged.meets
+
+
+def test_list_without_a_place_is_refused() -> None:
+    """A list of no candidates cannot be asked for."""
+    with pytest.raises(ValueError, match="top is 0"):
+        search(spec(), stock(*FILTER), top=0)
+
+
+def test_progress_counts_pairs() -> None:
+    """Progress tells of two pairs, in their order, and ends with both."""
+    told: list[tuple[int, int]] = []
+    shunts = (part("shunt", part="S1"), part("shunt", part="S2"))
+    search(spec(), stock(*shunts, *FILTER), progress=lambda done, total: told.append((done, total)))
+    assert told == [(1, 2), (2, 2)]

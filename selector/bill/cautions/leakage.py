@@ -3,10 +3,11 @@
 from __future__ import annotations
 
 from selector.bill.caution import Caution
+from selector.budget import TERMS
 from selector.candidate import Candidate, Conditions
 from selector.units import TEMPERATURE, shown
 
-_TERMS = ("bias current", "switch leakage", "converter input current")
+_TERMS = tuple(term.name for term in TERMS if term.leakage)
 
 
 def _texts(candidate: Candidate, conditions: Conditions) -> tuple[str, ...]:

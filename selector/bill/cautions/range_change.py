@@ -34,7 +34,7 @@ def _texts(candidate: Candidate, conditions: Conditions) -> tuple[str, ...]:
     if not bad:
         return ()
     per_cent = floor(100.0 * max(change.share for change in changes)) + 1
-    remedy = f"ranges.overlap = {per_cent} % would do" if per_cent < 100 else "no overlap would do"  # noqa: PLR2004  per cent
+    remedy = f"ranges.overlap = {per_cent} % would do" if per_cent < 100 else "no overlap would do"  # noqa: PLR2004 - per cent
     overlap = shown(conditions.overlap_frac, FRACTION)
     return tuple(
         f"Ranges {change.range} and {change.range + 1} may hand back and forth at {shown(change.high_a, CURRENT)}: "

@@ -17,4 +17,4 @@ def _removable(at: Operating) -> Real:
     return at.amplifier.bias_drift_stated
 
 
-TERM = Term("bias current", _sizes, removed_by=Calibration.ZERO, removable=_removable)
+TERM = Term("bias current", _sizes, removed_by=Calibration.ZERO, removable=_removable, leakage=True)

@@ -12,4 +12,4 @@ def _sizes(at: Operating) -> tuple[Size, ...]:
     return (Size(constant_a=at.conditions.converter_input_current_a * source_ohm / at.transfer_ohm),)
 
 
-TERM = Term("converter input current", _sizes)
+TERM = Term("converter input current", _sizes, leakage=True)

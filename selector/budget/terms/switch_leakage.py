@@ -14,4 +14,4 @@ def _sizes(at: Operating) -> tuple[Size, ...]:
     return (Size(constant_a=at.law.leakage_v(at.stage, open_a) / at.shunt_ohm),)
 
 
-TERM = Term("switch leakage", _sizes)
+TERM = Term("switch leakage", _sizes, leakage=True)

@@ -12,4 +12,4 @@ def _burden(at: ShuntAt) -> Measure:
     return Measure(at.burden_v, at.conditions.burden_limit_v)
 
 
-LIMIT = Limit("burden", (ShuntCheck(_burden),), VOLTAGE)
+LIMIT = Limit("burden", (ShuntCheck(_burden),), VOLTAGE, ranked=True)

@@ -14,4 +14,4 @@ def _error(at: Operating, error: Combined) -> Measure:
     return worst_point(at, error)
 
 
-LIMIT = Limit("error", (PointCheck(_error),), CURRENT)
+LIMIT = Limit("error", (PointCheck(_error),), CURRENT, ranked=True)

@@ -13,4 +13,4 @@ def _headroom(at: Operating) -> Measure:
     return Measure(at.transfer_ohm * at.conditions.current_max_a, usable_v)
 
 
-LIMIT = Limit("headroom", (RangeCheck(_headroom, last_only=True),), VOLTAGE)
+LIMIT = Limit("headroom", (RangeCheck(_headroom, last_only=True),), VOLTAGE, ranked=True)

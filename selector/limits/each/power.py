@@ -25,4 +25,5 @@ LIMIT = Limit(
         RangeCheck(_power, last_only=True),
     ),
     POWER,
+    ranked=True,
 )

@@ -14,7 +14,7 @@ def _borders(at: Operating) -> Measure:
 
 def _gains(at: Operating) -> Measure:
     """The gain is below that of the range below, strictly."""
-    return Measure(at.gain, at.border.below_gain, strict=True)
+    return Measure(at.gain, at.border.below_gain, strict=True, figure=False)
 
 
 LIMIT = Limit(

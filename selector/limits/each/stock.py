@@ -2,6 +2,7 @@
 
 from __future__ import annotations
 
+from selector.candidate.design import in_stock
 from selector.candidate.elementwise import larger
 from selector.limits.measure import ChoiceAt, ChoiceCheck, DesignAt, DesignCheck, Limit, Measure
 from selector.units import COUNT
@@ -14,7 +15,7 @@ def _enough(at: DesignAt) -> Measure | None:
     wanted = [
         (kind, code, pieces) for (kind, code), pieces in at.design.uses().items() if (kind, code) not in at.exempt
     ]
-    held = {(place.part.kind, place.part.part): place.part.quantity or 0 for place in at.design.places()}
+    held = {(place.part.kind, place.part.part): in_stock(place.part) for place in at.design.places()}
     needs = [(float(at.conditions.boards * pieces), float(held[kind, code])) for kind, code, pieces in wanted]
     if not needs:
         return None
