@@ -14,6 +14,8 @@ else:
     Real = float
     Truth = bool
 
+SMALLEST = 1e-18  # in SI units; a figure that must lie above 0 is no smaller
+
 
 def magnitude(value: Real) -> Real:
     """Return the absolute value of a float or of every element of an array."""

@@ -24,7 +24,7 @@ FLOORS = (
     ("parts", "spec"),
     ("gain", "physics", "series"),
     ("units",),
-    ("errors", "real"),
+    ("errors", "guard", "real"),
 )
 ARRAYS = ("search", "limits", "budget", "candidate", "gain", "physics", "real")
 HOMES = {

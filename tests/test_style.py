@@ -4,12 +4,15 @@ from __future__ import annotations
 
 import ast
 import importlib
-from collections.abc import Iterator
+import re
+from collections.abc import Iterator, Mapping
 from pathlib import Path
 
 import pytest
 
-from selector.gain import LAWS
+from selector.budget import METHODS
+from selector.gain import LAWS, Law
+from selector.parts import KINDS, Part
 
 CHECKOUT = Path(__file__).resolve().parents[1]
 PACKAGE = CHECKOUT / "selector"
@@ -23,7 +26,15 @@ REGISTRIES = (
     ("selector.budget.terms", "TERMS", "TERM"),
     ("selector.limits.each", "LIMITS", "LIMIT"),
     ("selector.bill.cautions", "CAUTIONS", "CAUTION"),
+    ("selector.report.formats", "FORMATS", "FORMAT"),
 )
+# What each entry of a registry of classes is derived from, the registry, and the folder of the classes.
+CLASSES: tuple[tuple[str, Mapping[str, object], type], ...] = (
+    ("selector.gain", LAWS, Law),
+    ("selector.parts", KINDS, Part),
+    ("selector.budget.methods", METHODS, object),
+)
+REASONED = re.compile(r"# noqa: [A-Z]+[0-9]+(, [A-Z]+[0-9]+)* - (?!the same$|as above$)\S")
 PLAIN = (ast.Import, ast.ImportFrom, ast.Assign, ast.AnnAssign)
 
 Function = ast.FunctionDef | ast.AsyncFunctionDef
@@ -73,6 +84,17 @@ def read(path: Path) -> ast.Module:
     return ast.parse(path.read_text(encoding="utf-8"), filename=str(path))
 
 
+def classes_of(folder: str, base: type) -> Iterator[type]:
+    """Yield the classes derived from a base that the files of a folder define, the base itself left out."""
+    package = importlib.import_module(folder)
+    for path in sorted(Path(str(package.__file__)).parent.glob("[!_]*.py")):
+        module = importlib.import_module(f"{folder}.{path.stem}")
+        for each in vars(module).values():
+            defined = isinstance(each, type) and each.__module__ == module.__name__
+            if defined and issubclass(each, base) and each is not base:
+                yield each
+
+
 def place(path: Path, line: int) -> str:
     """Return file and line as a message names them."""
     return f"{path.relative_to(CHECKOUT)}:{line}"
@@ -107,6 +129,18 @@ def test_init_files_hold_no_logic() -> None:
     assert [place(path, line) for path in inits for line in logic(read(path))] == []
 
 
+def test_every_silenced_rule_has_its_reason() -> None:
+    """Each `noqa` names its rules and, behind a dash, says why; none points to another line for its reason."""
+    files = [*SOURCES, *sorted((CHECKOUT / "tests").rglob("*.py"))]
+    found = [
+        place(path, number)
+        for path in files
+        for number, line in enumerate(path.read_text(encoding="utf-8").splitlines(), 1)
+        if "# noqa" in line and path != Path(__file__) and not REASONED.search(line)
+    ]
+    assert found == []
+
+
 def test_every_test_says_what_fact_it_holds() -> None:
     """Each test function has a docstring."""
     silent = [
@@ -124,9 +158,18 @@ def test_registry_holds_each_file_of_its_folder_once(folder: str, registry: str,
     package = importlib.import_module(folder)
     files = sorted(Path(str(package.__file__)).parent.glob("[!_]*.py"))
     defined = [getattr(importlib.import_module(f"{folder}.{path.stem}"), entry) for path in files]
-    listed = list(getattr(package, registry))
+    found = getattr(package, registry)
+    listed = list(found.values() if isinstance(found, dict) else found)
     assert sorted(map(id, listed)) == sorted(map(id, defined))
     assert len({each.name for each in listed}) == len(listed)
+    assert not isinstance(found, dict) or list(found) == [each.name for each in listed]
+
+
+@pytest.mark.parametrize(("folder", "registry", "base"), CLASSES)
+def test_registry_holds_each_class_of_its_folder_once(folder: str, registry: Mapping[str, object], base: type) -> None:
+    """A registry of classes lists every class of its sort that a file beside it defines, and no other."""
+    listed = [each if isinstance(each, type) else type(each) for each in registry.values()]
+    assert sorted(map(str, listed)) == sorted(map(str, classes_of(folder, base)))
 
 
 def test_every_law_has_a_file_of_its_own() -> None:
@@ -141,5 +184,9 @@ def test_the_checks_of_this_file_can_fail() -> None:
     text = 'if law == "fixed":\n    pass\nmatch law:\n    case "fixed":\n        pass\nfound = law in ("fixed",)\n'
     assert sorted(compared_names(ast.parse(text), frozenset({"fixed"}))) == [1, 4, 6]
     assert list(logic(ast.parse('"""Text."""\nimport os\nA = 1\nfor b in A:\n    pass\n'))) == [4]
+    assert REASONED.search("a  # noqa: S608 - names of ours")
+    assert not any(
+        map(REASONED.search, ("a  # noqa", "a  # noqa: S608", "a  # noqa: S608  why", "# noqa: S1 - as above"))
+    )
     long = "def f():\n    '''Text.\n\n    More.\n    '''\n" + "    a = 1\n" * 61
     assert [lines_of(each) for each in functions(ast.parse(long))] == [62]

@@ -8,7 +8,7 @@ from pathlib import Path
 
 from selector.app.design_parts import Chooser, Chosen
 from selector.app.naming import cut, did_you_mean
-from selector.app.toml_file import TomlFile, read_toml
+from selector.app.toml_file import TomlFile, read_design_file
 from selector.candidate import Design
 from selector.catalogue import Catalogue
 from selector.errors import Fault, InputRefused
@@ -56,7 +56,7 @@ def read_design(path: Path, open_one: Callable[[], Catalogue]) -> ReadDesign:
     InputRefused
         With every fault of the file: unknown keys and codes, faulty figures, parts that do not make a design.
     """
-    file = read_toml(path, "design")
+    file = read_design_file(path)
     entries, faults = _entries(file)
     named = any(isinstance(raw, str) for _, _, raw in entries) or any(key not in file.tables for key in FILTER)
     catalogue = open_one() if named and not faults else None

@@ -72,7 +72,7 @@ def generic_parts(kind: str, span: Span, fields: Mapping[str, str]) -> tuple[Par
             Fault("--from", f"no value of {span.series} lies from {span.low} to {span.high}", "give a wider span")
         )
     own = {"generic": True, "source": SOURCE.format(series=span.series), **fields}
-    first = read_part(wanted, {**own, "part": "generic", name: values[0]}, where="")
+    first = read_part(wanted, {**own, "part": "generic", name: values[0]}, where="", bare=False)
     tolerance = shown_figure(getattr(first, "tolerance", 0.0), FRACTION).replace(" ", "")
     return tuple(
         read_part(

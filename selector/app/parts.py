@@ -53,7 +53,7 @@ def added(kind: str, fields: Mapping[str, str], catalogue: Path | None = None) -
     wanted = kind_named(kind)
     refuse_unknown_fields(wanted, fields)
     source = ", ".join(filter(None, (who(), BY_HAND)))
-    part = read_part(wanted, {"source": source, **fields}, where="")
+    part = read_part(wanted, {"source": source, **fields}, where="", bare=False)
     with open_catalogue(catalogue, write=True) as opened:
         opened.add(part)
     return PartsChanged("added", ((part.kind, part.part),))
@@ -140,7 +140,7 @@ def to_ask(kind: str) -> tuple[tuple[str, str, bool], ...]:
 def cell_fault(kind: str, name: str, text: str) -> str | None:
     """Return what is wrong with one value of a field, None where nothing is."""
     try:
-        read_part(kind, {name: text}, where="")
+        read_part(kind, {name: text}, where="", bare=False)
     except InputRefused as refused:
         return next((f"{each.what}; {each.remedy}" for each in refused.faults if each.where == name), None)
     return None

@@ -98,7 +98,7 @@ class Catalogue:
         with self._store.writing(1) as writing:
             row = _row_of(writing.before, kind, code)
             before = part_of(kind, row, self._store.shown)
-            after = read_part(kind, {**cells_of(before), **fields}, where=f"{kind} {before.part}")
+            after = read_part(kind, {**cells_of(before), **fields}, where=f"{kind} {before.part}", bare=False)
             differences = differing(before, after)
             if after.part != before.part:
                 if after.part in writing.before.rows[kind]:

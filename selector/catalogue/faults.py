@@ -8,7 +8,7 @@ from contextlib import contextmanager
 
 from selector.errors import Fault, Unusable
 
-_RESTORE = "restore a backup: selector catalogue restore FILE"
+_REPLACE = "put a good copy of the file in its place"
 
 # The first name that the error's own name starts with counts, so the longer of two stands first.
 _SAYINGS: tuple[tuple[str, str, str], ...] = (
@@ -19,19 +19,19 @@ _SAYINGS: tuple[tuple[str, str, str], ...] = (
     ("SQLITE_PERM", "read-only, or its folder is", "make file and folder writable, or use another --catalogue"),
     ("SQLITE_FULL", "disk full; nothing was changed", "make room and do it again"),
     ("SQLITE_IOERR", "disk error, or a limit on file sizes; nothing was changed", "look at the disk and at ulimit -f"),
-    ("SQLITE_CORRUPT", "damaged", _RESTORE),
+    ("SQLITE_CORRUPT", "damaged", _REPLACE),
     ("SQLITE_NOTADB", "is no catalogue", "name another file with --catalogue"),
     ("SQLITE_CANTOPEN", "cannot be opened", "see that its folder is there and may be entered"),
     ("SQLITE_NOMEM", "out of memory; nothing was changed", "close other programs and do it again"),
     ("SQLITE_TOOBIG", "a text is too long to be kept", "shorten it"),
     ("SQLITE_CONSTRAINT", "refuses a value", "see the field's bounds: selector parts template KIND"),
-    ("SQLITE_MISMATCH", "damaged", _RESTORE),
+    ("SQLITE_MISMATCH", "damaged", _REPLACE),
 )
 
 
 def damaged(where: str, what: str) -> Unusable:
     """Return the error of a catalogue whose content is not what was written."""
-    return Unusable(Fault(where, f"damaged: {what}", _RESTORE))
+    return Unusable(Fault(where, f"damaged: {what}", _REPLACE))
 
 
 def not_a_catalogue(where: str, what: str) -> Unusable:
@@ -55,7 +55,7 @@ def fault_of(error: sqlite3.Error, where: str) -> Fault:
     for start, what, remedy in _SAYINGS:
         if name.startswith(start):
             return Fault(where, f"{what} ({error})", remedy)
-    return Fault(where, f"damaged ({error})", _RESTORE)
+    return Fault(where, f"damaged ({error})", _REPLACE)
 
 
 @contextmanager

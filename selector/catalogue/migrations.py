@@ -114,7 +114,7 @@ def _digest_anew(db: Database) -> None:
         values = ", ".join(quoted(column.name) for column in columns(kind))
         rows = db.conn.execute(f"SELECT {values} FROM {quoted(kind)}").fetchall()  # noqa: S608 - names of ours, quoted
         new = [(row_digest(kind, row), row[0]) for row in rows]
-        db.conn.executemany(f'UPDATE {quoted(kind)} SET "digest" = ? WHERE "part" = ?', new)  # noqa: S608 - the same
+        db.conn.executemany(f'UPDATE {quoted(kind)} SET "digest" = ? WHERE "part" = ?', new)  # noqa: S608 - names of ours, quoted
         digests += [digest for digest, _ in new]
     db.table("state").update(1, {"rows": len(digests), "digests": digest_sum(digests)})
 

@@ -76,7 +76,7 @@ def _tests(column: Column) -> list[str]:
     if column.sort != "quantity":
         return [f"length({name}) <= {_MOST_CHARACTERS}"]
     tests = [f"abs({name}) < {_TOO_LARGE!r}"]
-    bounds = ((">=", column.least), (">", column.above), ("<", column.below))
+    bounds = ((">=", column.least), (">", column.above), ("<", column.below), ("<=", column.most))
     return tests + [f"{name} {sign} {bound!r}" for sign, bound in bounds if _binds(bound)]
 
 

@@ -72,8 +72,8 @@ def bill(
 def _of_rank(asked: Asked, rank: int, boards: int | None, catalogue: Path | None, sink: Sink) -> None:
     """Print the bill of a place in the list; where it is empty, say why."""
     from selector.app.bill import bill as answer_bill  # noqa: PLC0415 - arrays are slow to import
-    from selector.report import render  # noqa: PLC0415 - the same
-    from selector.report.answers import Shortlist  # noqa: PLC0415 - the same
+    from selector.report import render  # noqa: PLC0415 - arrays are slow to import
+    from selector.report.answers import Shortlist  # noqa: PLC0415 - arrays are slow to import
 
     with Progress() as progress:
         shown = answer_bill(asked, rank=rank, boards=boards, catalogue=catalogue, progress=progress)

@@ -34,7 +34,7 @@ def check(
     catalogue = catalogue_of(context)
     sink = sink_of(form, output, inputs=[spec, design], catalogue=catalogue)
     from selector.app.check import check as answer_check  # noqa: PLC0415 - arrays are slow to import
-    from selector.app.specs import Asked  # noqa: PLC0415 - the same
+    from selector.app.specs import Asked  # noqa: PLC0415 - arrays are slow to import
 
     checked = answer_check(Asked(spec, set_ or (), weights), design, catalogue=catalogue)
     sink.answer(checked)

@@ -22,7 +22,7 @@ def demo(keep: KeepOption = None, form: FormOption = None) -> None:
     """Do the main job on a bundled scenario."""
     sink = sink_of(form, None)
     from selector.app.demo import CATALOGUE, SPEC  # noqa: PLC0415 - arrays are slow to import
-    from selector.app.demo import demo as answer_demo  # noqa: PLC0415 - the same
+    from selector.app.demo import demo as answer_demo  # noqa: PLC0415 - arrays are slow to import
 
     with Progress() as progress:
         listed = answer_demo(keep, progress)

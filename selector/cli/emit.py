@@ -58,7 +58,7 @@ def sink_of(
     if output is None:
         return Sink(chosen)
     from selector.app.cataloguing import path_of  # noqa: PLC0415 - only where a file is written
-    from selector.app.output import target  # noqa: PLC0415 - the same
+    from selector.app.output import target  # noqa: PLC0415 - only where a file is written
 
     return Sink(chosen, target(output, inputs=[*inputs, path_of(catalogue)]))
 

@@ -32,7 +32,7 @@ def fill(
     """
     sink = sink_of(form, None)
     from selector.app.fill import Span  # noqa: PLC0415 - not needed for help
-    from selector.app.fill import fill as answer_fill  # noqa: PLC0415 - the same
-    from selector.app.parts import fields_of  # noqa: PLC0415 - the same
+    from selector.app.fill import fill as answer_fill  # noqa: PLC0415 - not needed for help
+    from selector.app.parts import fields_of  # noqa: PLC0415 - not needed for help
 
     sink.answer(answer_fill(kind, Span(series, from_, to), fields_of(pairs or ()), catalogue_of(context)))

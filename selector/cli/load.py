@@ -55,7 +55,7 @@ def load(
     inputs = files if rejects is None else [*files, rejects]
     sink = sink_of(form, output, inputs=inputs, catalogue=catalogue)
     from selector.app.load import Order  # noqa: PLC0415 - not needed for help
-    from selector.app.load import load as answer_load  # noqa: PLC0415 - the same
+    from selector.app.load import load as answer_load  # noqa: PLC0415 - not needed for help
 
     confirm = _confirmed if can_ask() and not yes else None
     loaded = answer_load(files, Order(kind, headings_of(map_ or ()), dry_run, replace, rejects, catalogue, confirm))

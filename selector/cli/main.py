@@ -29,7 +29,7 @@ def main(arguments: list[str] | None = None) -> int:
 def _run(arguments: list[str] | None) -> int:
     """Run one command."""
     import os  # noqa: PLC0415 - signals are seen to first
-    import sys  # noqa: PLC0415 - the same
+    import sys  # noqa: PLC0415 - signals are seen to first
 
     os.environ.setdefault("OPENBLAS_NUM_THREADS", "1")  # read when numpy starts: more threads only get in the way
     from selector.cli.run import run  # noqa: PLC0415 - streams are seen to first

@@ -36,7 +36,7 @@ def query(
     most = top_of(top)
     sink = sink_of(form, output, inputs=[spec], catalogue=catalogue)
     from selector.app.query import query as answer_query  # noqa: PLC0415 - arrays are slow to import
-    from selector.app.specs import Asked  # noqa: PLC0415 - the same
+    from selector.app.specs import Asked  # noqa: PLC0415 - arrays are slow to import
 
     asked = Asked(spec, set_ or (), weights, variants)
     with Progress() as progress:

@@ -17,7 +17,7 @@ from selector.errors import EXIT_DONE, EXIT_INPUT_REFUSED, EXIT_INTERRUPTED, EXI
 _UsageError = cast("type[Exception]", typer.BadParameter.__bases__[0])
 
 
-def run(arguments: Sequence[str]) -> int:
+def run(arguments: Sequence[str]) -> int:  # noqa: PLR0911 - one status for each way to end
     """Run a command and return its exit status; only signals are raised."""
     try:
         return _invoked(arguments)
@@ -36,6 +36,9 @@ def run(arguments: Sequence[str]) -> int:
         return EXIT_UNUSABLE
     except RecursionError:
         faults.lines(["an input is nested too deep"])
+        return EXIT_INPUT_REFUSED
+    except ArithmeticError:
+        faults.lines(["a figure of a part or of the spec is too large or too small to compute with; see them through"])
         return EXIT_INPUT_REFUSED
 
 

@@ -25,16 +25,21 @@ def new(
 ) -> None:
     """Write a commented spec; asks on a terminal for what is required and not set."""
     from selector.app import specs  # noqa: PLC0415 - not needed for help
-    from selector.app.cataloguing import path_of  # noqa: PLC0415 - the same
-    from selector.app.output import target  # noqa: PLC0415 - the same
+    from selector.app.cataloguing import path_of  # noqa: PLC0415 - not needed for help
+    from selector.app.output import target  # noqa: PLC0415 - not needed for help
 
     place = target(file, inputs=[path_of(catalogue_of(context))], fresh=True)
     given = specs.overrides_of(set_ or ())
-    text = specs.new_text(ask_spec(given) if can_ask() else given)
+    if can_ask():
+        given = ask_spec(given)
+    text = specs.new_text(given)
     if place is None:
         put(text)
         return
     place.write(text)
+    examples = [name for name, _, _ in specs.to_ask(given)]
+    if examples:
+        faults.lines([f"examples to be replaced by your own: {', '.join(examples)}"])
     faults.lines([f"{file} is written; go on with: selector query {file}"])
 
 

@@ -6,7 +6,7 @@ from collections.abc import Iterator, Mapping
 from dataclasses import dataclass, field
 
 from selector.errors import InputRefused
-from selector.ingest.guard import unguarded
+from selector.guard import unguarded
 from selector.ingest.heading_units import with_unit
 from selector.ingest.headings import KIND, Heading, nearest
 from selector.ingest.layout import missing_fields

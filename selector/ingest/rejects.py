@@ -7,7 +7,7 @@ import io
 from collections.abc import Iterator, Sequence
 from itertools import zip_longest
 
-from selector.ingest.guard import guarded
+from selector.guard import guarded
 from selector.ingest.headings import ADDED_BY_REJECTS, plain
 from selector.ingest.refused import CellFault, RefusedRow
 from selector.ingest.result import StockFile

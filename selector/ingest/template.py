@@ -6,8 +6,8 @@ import csv
 import io
 
 from selector.errors import Fault, UsageRefused
+from selector.guard import guarded
 from selector.ingest.examples import EXAMPLES
-from selector.ingest.guard import guarded
 from selector.ingest.headings import KIND, nearest
 from selector.parts import KINDS, Column, columns
 

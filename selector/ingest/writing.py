@@ -6,7 +6,7 @@ import csv
 import io
 from collections.abc import Iterable, Mapping
 
-from selector.ingest.guard import guarded
+from selector.guard import guarded
 from selector.ingest.headings import KIND
 from selector.parts import KINDS, Column, Part, cells_of, columns
 

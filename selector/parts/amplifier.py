@@ -6,7 +6,7 @@ from typing import Annotated, ClassVar
 
 from selector.gain import LAWS
 from selector.parts.base import Part, Text
-from selector.parts.holds import FLAG, amount, choice, fraction, signed, temperature, value
+from selector.parts.holds import FLAG, amount, choice, decibels, fraction, signed, temperature, value
 from selector.parts.law_figures import buffered_gain_capacitor, figures_of_the_law
 from selector.parts.rules import Rule, not_below
 from selector.units import (
@@ -14,7 +14,6 @@ from selector.units import (
     CONDUCTANCE,
     CURRENT,
     CURRENT_NOISE,
-    DECIBEL,
     FREQUENCY,
     PER_KELVIN,
     RATIO,
@@ -59,12 +58,12 @@ class Amplifier(Part):
     bias_current_drift: Annotated[float | None, amount(AMPERE_PER_KELVIN)] = None
     offset_current: Annotated[float | None, amount(CURRENT)] = None
     output_bias_current: Annotated[float, amount(CURRENT)] = 0.0
-    cmrr: Annotated[float, value(DECIBEL)]
-    psrr: Annotated[float, value(DECIBEL)]
+    cmrr: Annotated[float, decibels()]
+    psrr: Annotated[float, decibels()]
     gain_error: Annotated[float, fraction()] = 0.0
     gain_drift: Annotated[float, amount(PER_KELVIN)] = 0.0
     nonlinearity: Annotated[float, fraction()] = 0.0
-    open_loop_gain: Annotated[float | None, value(DECIBEL)] = None
+    open_loop_gain: Annotated[float | None, decibels()] = None
     noise_density: Annotated[float, value(VOLTAGE_NOISE)]
     output_noise_density: Annotated[float, amount(VOLTAGE_NOISE)] = 0.0
     current_noise_density: Annotated[float, amount(CURRENT_NOISE)] = 0.0

@@ -15,7 +15,10 @@ from selector.units import COUNT, Quantity
 
 @dataclass(frozen=True, slots=True)
 class Column:
-    """One field of a kind. Bounds in SI units: `least` <= value, `above` < value < `below`; None is no bound."""
+    """One field of a kind.
+
+    Bounds are in SI units: `least` <= value <= `most`, `above` < value < `below`; None is no bound.
+    """
 
     name: str
     holds: Holds
@@ -51,6 +54,11 @@ class Column:
     def below(self) -> float | None:
         """Return what the value must lie below."""
         return self.holds.below
+
+    @property
+    def most(self) -> float | None:
+        """Return the largest value allowed."""
+        return self.holds.most
 
     @property
     def choices(self) -> tuple[str | int, ...]:

@@ -9,12 +9,14 @@ from typing import Literal
 from pydantic import GetCoreSchemaHandler
 from pydantic_core import CoreSchema, core_schema
 
-from selector.units import COUNT, FRACTION, TEMPERATURE, Quantity, QuantityError, shown
+from selector.real import SMALLEST
+from selector.units import COUNT, DECIBEL, FRACTION, TEMPERATURE, Quantity, QuantityError, shown
 
 Sort = Literal["quantity", "text", "flag", "choice", "names"]
 Value = float | int | str | bool | tuple[str, ...] | None
 
 TOO_LARGE = 1e15
+MOST_DB = 400.0
 ABSOLUTE_ZERO_DEGC = -273.15
 
 
@@ -26,7 +28,7 @@ class CellRefused(QuantityError):
 class Holds:
     """What a field holds; stands in the field's Annotated type and is enforced by the model.
 
-    Bounds are in SI units: `least` <= value, `above` < value < `below`. `choices` are the only values taken.
+    Bounds are in SI units: `least` <= value <= `most`, `above` < value < `below`. `choices` are the only values taken.
     """
 
     sort: Sort
@@ -34,6 +36,7 @@ class Holds:
     least: float | None = None
     above: float | None = None
     below: float | None = None
+    most: float | None = None
     choices: tuple[str | int, ...] = ()
 
     def check(self, value: Value, read: str, name: str) -> None:
@@ -54,6 +57,8 @@ class Holds:
             raise CellRefused(f"{read} is too small", f"{name} must be at least {_bound(self.least, self.quantity)}")
         if self.below is not None and not value < self.below:
             raise CellRefused(f"{read} is too large", f"{name} must be below {_bound(self.below, self.quantity)}")
+        if self.most is not None and not value <= self.most:
+            raise CellRefused(f"{read} is too large", f"{name} must be at most {_bound(self.most, self.quantity)}")
 
     def __get_pydantic_core_schema__(self, source: object, handler: GetCoreSchemaHandler) -> CoreSchema:
         """Let the model refuse what lies outside the bounds, whoever builds it."""
@@ -70,8 +75,13 @@ def _bound(bound: float, quantity: Quantity) -> str:
 
 
 def value(quantity: Quantity) -> Holds:
-    """Return what holds a value or rating: above 0."""
-    return Holds("quantity", quantity, above=0.0, below=TOO_LARGE)
+    """Return what holds a value or rating: above 0, and 1e-18 or more."""
+    return Holds("quantity", quantity, above=0.0, least=SMALLEST, below=TOO_LARGE)
+
+
+def decibels() -> Holds:
+    """Return what holds a ratio in dB: above 0, at most 400, which is 1e20."""
+    return Holds("quantity", DECIBEL, above=0.0, least=SMALLEST, below=TOO_LARGE, most=MOST_DB)
 
 
 def amount(quantity: Quantity) -> Holds:

@@ -25,7 +25,7 @@ def design_toml(design: Design, in_line: frozenset[tuple[str, str]] = frozenset(
     def value(part: Part) -> str:
         if not _NAMELESS.fullmatch(part.part) and (part.kind, part.part) not in in_line:
             return _text(part.part)
-        from selector.parts import cells_of  # noqa: PLC0415  as above
+        from selector.parts import cells_of  # noqa: PLC0415 - parts are heavy to import
 
         return "{ " + ", ".join(f"{name} = {_text(cell)}" for name, cell in cells_of(part).items()) + " }"
 

@@ -8,9 +8,10 @@ from decimal import Decimal
 from fractions import Fraction
 
 from selector.errors import Fault, UsageRefused
+from selector.real import SMALLEST
 from selector.series.tables import SERIES
 
-LEAST, MOST = 1e-18, 1e15  # outside lies no part's value
+LEAST, MOST = SMALLEST, 1e15  # outside lies no part's value
 _ALL_DECADES = 33
 
 

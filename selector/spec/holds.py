@@ -10,6 +10,7 @@ from typing import Literal
 from pydantic import GetCoreSchemaHandler
 from pydantic_core import CoreSchema, core_schema
 
+from selector.real import SMALLEST
 from selector.units import COUNT, FRACTION, MONEY, RATIO, TEMPERATURE, Quantity, QuantityError, shown
 
 Sort = Literal["quantity", "choice", "flag", "text", "codes", "codes by kind", "bands"]
@@ -88,8 +89,8 @@ class Holds:
 
 
 def value(quantity: Quantity, meaning: str, example: str) -> Holds:
-    """Return what holds a value or a limit: above 0."""
-    return Holds("quantity", meaning, example, quantity, above=0.0)
+    """Return what holds a value or a limit: above 0, and 1e-18 or more."""
+    return Holds("quantity", meaning, example, quantity, above=0.0, least=SMALLEST)
 
 
 def amount(quantity: Quantity, meaning: str, example: str) -> Holds:
@@ -125,7 +126,7 @@ def positive(meaning: str, example: str) -> Holds:
 
 def share(meaning: str, example: str) -> Holds:
     """Return what holds a part of a whole: above 0, at most all of it."""
-    return Holds("quantity", meaning, example, FRACTION, above=0.0, most=1.0)
+    return Holds("quantity", meaning, example, FRACTION, above=0.0, least=SMALLEST, most=1.0)
 
 
 def choice(meaning: str, *words: str) -> Holds:

@@ -3,7 +3,7 @@
 from __future__ import annotations
 
 import re
-from collections.abc import Iterator
+from collections.abc import Iterator, Mapping
 from dataclasses import dataclass, field
 
 _SIGN = re.compile(
@@ -125,6 +125,11 @@ def outwards(key: str) -> Iterator[str]:
         yield key
         element = _ELEMENT.search(key)
         key = key[: element.start()] if element else key.rpartition(".")[0]
+
+
+def line_of(key: str, lines: Mapping[str, int]) -> int | None:
+    """Return the line of a key, or of the nearest that it stands in; None where no line is known."""
+    return next((lines[name] for name in outwards(key) if name in lines), None)
 
 
 def _signs(text: str) -> Iterator[tuple[str, str, int]]:

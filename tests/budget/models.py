@@ -41,7 +41,7 @@ class Inputs:
         """Return a value around 0 with a standard deviation."""
         return self.uncertain(0.0, standard)
 
-    def shunt(self, heating_a: float, *, calibrated: bool) -> Any:  # noqa: ANN401 - as above
+    def shunt(self, heating_a: float, *, calibrated: bool) -> Any:  # noqa: ANN401 - a number of the library
         """Return the resistance of the shunt: tolerance, ambient, the heat of a current, age, each by itself."""
         shunt = self.parts["shunt"]
         line = (shunt["zero_power_temp"] - shunt["full_power_temp"]) / shunt["power"]
@@ -53,7 +53,7 @@ class Inputs:
                 total = total + self.limit(change)
         return shunt["resistance"] * total
 
-    def resistor(self, part: dict[str, float], *, calibrated: bool) -> Any:  # noqa: ANN401 - as above
+    def resistor(self, part: dict[str, float], *, calibrated: bool) -> Any:  # noqa: ANN401 - a number of the library
         """Return a gain resistor: tolerance and ambient, each by itself."""
         off = self.limit(part["tempco"] * self.change_k)
         if not calibrated:
@@ -108,7 +108,7 @@ def low_side(uncertain: Uncertain, number: int, current_a: float) -> Any:  # noq
     return _read(given, output, current_a * shunt_ohm * nominal, calibrated=False) / (nominal * shunt_ohm)
 
 
-def high_side(uncertain: Uncertain, number: int, current_a: float, upper_a: float) -> Any:  # noqa: ANN401 - as above
+def high_side(uncertain: Uncertain, number: int, current_a: float, upper_a: float) -> Any:  # noqa: ANN401 - a number of the library
     """Return the reading of the one-resistor design, zero and span calibrated at `upper_a`, in a range from 1."""
     given = Inputs("high_side_two_way", uncertain)
     spec, amplifier, switch, limit = given.spec, given.parts["amplifier"], given.parts["switch"], given.limit
@@ -141,7 +141,7 @@ def high_side(uncertain: Uncertain, number: int, current_a: float, upper_a: floa
     return read_v / (nominal * shunt_ohm) + known
 
 
-def _read(given: Inputs, output_v: Any, nominal_v: float, *, calibrated: bool) -> Any:  # noqa: ANN401 - as above
+def _read(given: Inputs, output_v: Any, nominal_v: float, *, calibrated: bool) -> Any:  # noqa: ANN401 - a number of the library
     """Return the voltage that the converter takes an output for."""
     spec, limit = given.spec, given.limit
     lsb_v = spec["converter.reference"] / 2.0 ** spec["converter.bits"]

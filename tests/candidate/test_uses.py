@@ -25,6 +25,15 @@ def test_power_of_shunt_and_idle() -> None:
     assert idle_power_w(operating()) == near(IDLE_W)
 
 
+def test_figures_at_two_ampere() -> None:
+    """2 A drop 0.202 V and make 0.404 W; a current output of 4 V drives 0.4 mA; nothing of 4 V is left."""
+    at = operating(design("current-output"), current__max=2.0)
+    assert at.burden_v == near(0.202)
+    assert shunt_power_w(at) == near(0.404)
+    assert power_w(at) == near(0.404 + 5.5 * (1e-3 + 4e-4))
+    assert headroom_frac(at) == 0.0
+
+
 @pytest.mark.parametrize(
     ("law", "driven_w"),
     [

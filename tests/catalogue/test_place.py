@@ -24,7 +24,7 @@ CONTENTS = {
     "text": (b"part,resistance\nR1,4k99\n" * 20, "its first bytes are not those of a database"),
     "short text": (b"x", "its first bytes are not those of a database"),
     "picture": (b"\x89PNG\r\n\x1a\n" + bytes(200), "its first bytes are not those of a database"),
-    "random bytes": (random.Random(1).randbytes(5000), "its first bytes are not those of a database"),  # noqa: S311 - noise
+    "random bytes": (random.Random(1).randbytes(5000), "its first bytes are not those of a database"),
     "magic only": (MAGIC, "its first bytes are not those of a database"),
     "magic and noughts": (MAGIC + bytes(4080), "it is the database of another program"),
     "our mark, version 0": (MAGIC + bytes(52) + b"sel1" + bytes(4000), "its version is 0"),
@@ -78,7 +78,7 @@ def test_a_newer_version_is_refused_with_both_versions(stocked: Path, sql: Sql, 
 def test_a_header_of_ours_over_noise_is_damage(tmp_path: Path, stocked: Path, resistor: Make) -> None:
     """A good header with random pages behind it is refused, and its bytes stay."""
     path = tmp_path / "noise.db"
-    content = stocked.read_bytes()[:100] + random.Random(2).randbytes(30_000)  # noqa: S311 - noise
+    content = stocked.read_bytes()[:100] + random.Random(2).randbytes(30_000)
     path.write_bytes(content)
     for write in (False, True):
         with pytest.raises(Unusable), open_catalogue(path, write=write) as catalogue:

@@ -19,6 +19,7 @@ REFERENCE = Path(__file__).resolve().parents[1] / "reference"
 REFUSED = [
     ("resistance", "0", "CHECK"),
     ("resistance", "-1", "CHECK"),
+    ("resistance", "9e-19", "CHECK"),
     ("resistance", "9e999", "CHECK"),
     ("resistance", "-9e999", "CHECK"),
     ("resistance", "1e15", "CHECK"),

@@ -118,9 +118,12 @@ def test_the_wait_for_a_lock_is_half_a_minute(stocked: Path) -> None:
 def test_an_open_reader_blocks_no_writer(stocked: Path, sql: Sql) -> None:
     """While a reader holds its catalogue open, another program can lock the file for itself alone."""
     with open_catalogue(stocked) as catalogue, sql(stocked) as other:
-        catalogue.parts("resistor")
+        assert len(catalogue.parts("resistor")) == 3
         other.execute("BEGIN EXCLUSIVE")
-        other.execute("ROLLBACK")
+        assert other.in_transaction
+        other.execute("UPDATE resistor SET note = 'held'")
+        other.execute("COMMIT")
+        assert other.execute("SELECT DISTINCT note FROM resistor").fetchall() == [("held",)]
 
 
 @pytest.mark.parametrize("write", [False, True])

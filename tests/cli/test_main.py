@@ -39,6 +39,11 @@ def raising(error: BaseException) -> object:
     [
         (MemoryError(), 4, "out of memory; close other programs, or ask for less\n"),
         (RecursionError(), 3, "an input is nested too deep\n"),
+        (
+            OverflowError(),
+            3,
+            "a figure of a part or of the spec is too large or too small to compute with; see them through\n",
+        ),
         (OSError(28, "No space left on device", "x.db"), 4, "x.db: cannot be used: No space left on device\n"),
         (OSError(28, "No space left on device"), 4, "standard output: cannot be written: No space left on device\n"),
         (BrokenPipeError(), 141, ""),

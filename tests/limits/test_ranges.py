@@ -20,6 +20,7 @@ from tests.builders import (
     measured,
     meets,
     near,
+    shunt,
     switched,
 )
 from tests.limits.edges import check_edge
@@ -43,6 +44,11 @@ def test_headroom() -> None:
     """A gain of 38 brings 3.8 V, 5 % below the top of 4 V; with 20 % of headroom 32."""
     check_edge("headroom", _gain, 38.0, meets_from="below")
     check_edge("headroom", lambda gain: _gain(gain, limits__headroom=0.2), 32.0, meets_from="below")
+
+
+def test_headroom_at_the_largest_current() -> None:
+    """With 0.5 A at most a gain of 76 brings the same 3.8 V."""
+    check_edge("headroom", lambda gain: _gain(gain, current__max=0.5), 76.0, meets_from="below")
 
 
 def test_headroom_above_a_zero_and_both_ways() -> None:
@@ -74,6 +80,14 @@ def test_range_order_is_strict() -> None:
     apart = switched("current-output", 39_990.0, 39_990.0 * (1.0 - 1e-13), 9_990.0)
     assert meets("range order", chain(apart))
     assert not meets("range order", chain(switched("current-output", 39_990.0 * (1.0 - 1e-13), 39_990.0, 9_990.0)))
+
+
+def test_range_order_on_the_border_itself() -> None:
+    """4 V over a gain of 32 and 0.125 ohm are 1 A to the last digit, which is I_max: not below it, so not met."""
+    of = switched("current-output", 15_990.0, 7_990.0, shunts=(shunt(resistance=0.125),))
+    found = chain(of, limits__headroom=0.0)
+    assert found.ranges[0].high_a == found.ranges[1].high_a == 1.0
+    assert not meets("range order", found)
 
 
 def test_range_order_of_gains() -> None:

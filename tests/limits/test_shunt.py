@@ -26,6 +26,12 @@ def test_rating() -> None:
     check_edge("rating", lambda watt: _with({"power": watt}), 0.202, meets_from="above")
 
 
+def test_rating_goes_with_the_square_of_the_current() -> None:
+    """2 A make 0.404 W, which half of 0.808 W carries; 0.5 A make 25.25 mW."""
+    check_edge("rating", lambda watt: _with({"power": watt}, current__max=2.0), 0.808, meets_from="above")
+    check_edge("rating", lambda watt: _with({"power": watt}, current__max=0.5), 0.0505, meets_from="above")
+
+
 def test_rating_by_load_fraction() -> None:
     """All of 0.101 W carries it where the whole rating may be used."""
     check_edge("rating", lambda watt: _with({"power": watt}, limits__load_fraction=1.0), 0.101, meets_from="above")
@@ -67,6 +73,7 @@ def test_amplifier_input() -> None:
 
     check_edge("amplifier input", built, 0.101, meets_from="above")
     check_edge("amplifier input", lambda volt: built(volt, **OVERLOAD), 0.303, meets_from="above")
+    check_edge("amplifier input", lambda volt: built(volt, current__max=2.0), 0.202, meets_from="above")
     small = OVERLOAD | {"current__overload": 0.5}
     check_edge("amplifier input", lambda volt: built(volt, **small), 0.101, meets_from="above")
 
@@ -86,6 +93,7 @@ def test_burden() -> None:
     """1 A drops 0.101 V, with 20 mohm of lead 0.121 V."""
     check_edge("burden", lambda volt: chain(limits__burden=volt), 0.101, meets_from="above")
     check_edge("burden", lambda volt: chain(limits__burden=volt, sense__lead=0.02), 0.121, meets_from="above")
+    check_edge("burden", lambda volt: chain(limits__burden=volt, current__max=2.0), 0.202, meets_from="above")
 
 
 def test_figure_on_its_limit_meets_it_to_a_trillionth() -> None:

@@ -124,23 +124,23 @@ def _choice(name: str, at: ChoiceAt) -> Measure:
 
 
 def _beside(of: Design, **changes: object) -> ChoiceAt:
-    """Return a design beside three filter pairs; the third takes a resistor that also stands elsewhere."""
+    """Return a design beside three filter pairs; the third takes parts that stand elsewhere too."""
     return ChoiceAt(
         conditions=conditions(**THREE_BOARDS, **changes),
         design=replace(of, filter_resistor=None, filter_capacitor=None),
         exempt=frozenset(),
         resistor_uses=np.array([1.0, 1.0, 2.0]),
-        capacitor_uses=np.array([1.0, 1.0, 1.0]),
-        held_resistors=np.array([3.0, 2.0, 5.0]),
-        held_capacitors=np.array([3.0, 9.0, 9.0]),
+        capacitor_uses=np.array([1.0, 1.0, 2.0]),
+        held_resistors=np.array([3.0, 2.0, 6.0]),
+        held_capacitors=np.array([3.0, 9.0, 4.0]),
         cost=np.array([3.0, 4.0, np.inf]),
     )
 
 
 def test_stock_of_every_filter_pair() -> None:
-    """Three of each will do; 2 of 3 are one short, 5 of twice 3 are one short; so is all where the rest is short."""
+    """Three of each will do; 2 resistors are one short, 4 capacitors of twice 3 two; all are beside a short rest."""
     measure = _choice("stock", _beside(HELD))
-    assert np.array_equal(measure.value, [0.0, 1.0, 1.0])
+    assert np.array_equal(measure.value, [0.0, 1.0, 2.0])
     assert np.array_equal(measure.meets, [True, False, False])
     short = _choice("stock", _beside(replace(HELD, shunts=(shunt(quantity=1),))))
     assert np.array_equal(short.value, [2.0, 2.0, 2.0])

@@ -23,7 +23,7 @@ ORDERED = (
     ("resistance_max", "resistance_min"),
     ("common_mode_max", "common_mode_min"),
 )
-TEXT = st.text(st.characters(exclude_categories=["C", "Z"]), min_size=1, max_size=20)
+TEXT = st.text(st.characters(categories=["Lu", "Ll", "Nd", "Po", "Pd", "Sm"]), min_size=1, max_size=20)
 
 
 def value_of(column: Column) -> st.SearchStrategy[object]:
@@ -39,7 +39,8 @@ def value_of(column: Column) -> st.SearchStrategy[object]:
     if column.whole:
         return st.integers(int(column.least or 0), 10**9)
     low = column.least if column.least is not None else column.above
-    return st.floats(low, column.below, exclude_min=column.above is not None, exclude_max=True)
+    high = column.below if column.most is None else column.most
+    return st.floats(low, high, exclude_min=column.least is None, exclude_max=column.most is None)
 
 
 @st.composite

@@ -161,12 +161,12 @@ def checked(spec: Spec, offer: Offer) -> Checked:
     """Return a design that meets all but the burden."""
     candidate = replace(offer.candidate, rank=None, pareto=None)
     verdicts = (
-        Verdict("law", True, None, None),  # noqa: FBT003  the order of the fields says it
+        Verdict("law", True, None, None),  # noqa: FBT003 - the order of the fields says it
         Verdict("overload", None, None, None),
-        Verdict("burden", False, 0.118, 0.1),  # noqa: FBT003  the same
-        Verdict("error", True, 2.57e-6, 4.2e-6),  # noqa: FBT003  the same
+        Verdict("burden", False, 0.118, 0.1),  # noqa: FBT003 - the order of the fields says it
+        Verdict("error", True, 2.57e-6, 4.2e-6),  # noqa: FBT003 - the order of the fields says it
     )
-    return Checked(spec, Judged(candidate, False, verdicts), replace(offer, candidate=candidate))  # noqa: FBT003  the same
+    return Checked(spec, Judged(candidate, False, verdicts), replace(offer, candidate=candidate))  # noqa: FBT003 - the order of the fields says it
 
 
 @pytest.fixture

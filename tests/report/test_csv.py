@@ -10,7 +10,6 @@ import pytest
 
 from selector.report import render
 from selector.report.answers import BillShown, Checked, PartsListed, Shortlist
-from selector.report.formats.csv import guarded
 
 
 def read(text: str) -> list[dict[str, str]]:
@@ -67,12 +66,6 @@ def test_a_formula_gets_one_more_mark(bill: BillShown, start: str) -> None:
     line = replace(bill.offer.bill[0], part=cell)
     text = render(replace(bill, offer=replace(bill.offer, bill=(line,))), "csv")
     assert read(text)[0]["part"] == f"'{cell}"
-
-
-@pytest.mark.parametrize("cell", ["-5", "+5.2", "-1e-6", "-.5", "S-1", "'quoted'", "", "1=1"])
-def test_numbers_and_plain_text_get_none(cell: str) -> None:
-    """A number keeps its sign, and a mark without a formula behind it stays single."""
-    assert guarded(cell) == cell
 
 
 def test_a_stock_file_is_printed_as_it_is_given(bill: BillShown) -> None:

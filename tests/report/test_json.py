@@ -26,7 +26,7 @@ SEARCHED = (
 LINE = ("use", "kind", "part", "description", "quantity", "on_hand", "unit_cost", "line_cost")
 
 
-def read(text: str) -> Any:  # noqa: ANN401  JSON is read as whatever it is
+def read(text: str) -> Any:  # noqa: ANN401 - JSON is read as whatever it is
     """Return JSON read strictly: NaN and infinity are refused."""
 
     def refuse(word: str) -> None:

@@ -2,6 +2,7 @@
 
 from __future__ import annotations
 
+import errno
 import os
 import pty
 import signal
@@ -80,6 +81,18 @@ def test_no_control_character_of_data_is_printed(run_own: Run, tmp_path: Path) -
     assert run_own("query", "a\nb.toml").stderr.startswith("a\\x0ab.toml, current.min: missing")
 
 
+def opened_by_a_reader(pipe: Path) -> int:
+    """Return the writing end of a pipe once somebody reads it; fail where nobody does within half a minute."""
+    for _ in range(3000):
+        try:
+            return os.open(pipe, os.O_WRONLY | os.O_NONBLOCK)
+        except OSError as error:
+            if error.errno != errno.ENXIO:  # which says that nobody reads yet
+                raise
+            time.sleep(0.01)
+    pytest.fail("nobody reads the pipe")
+
+
 @pytest.mark.parametrize(
     ("number", "status"),
     [(signal.SIGINT, 130), (signal.SIGTERM, 143), (signal.SIGHUP, 129)],
@@ -95,9 +108,10 @@ def test_signal_ends_a_wait(number: signal.Signals, status: int, tmp_path: Path)
         stderr=subprocess.PIPE,
         stdout=subprocess.PIPE,
     )
-    time.sleep(1.0)
+    pipe = opened_by_a_reader(tmp_path / "pipe")
     process.send_signal(number)
-    out, err = process.communicate(timeout=5)
+    out, err = process.communicate(timeout=30)
+    os.close(pipe)
     assert (process.returncode, out, err) == (status, b"", b"")
 
 

@@ -60,3 +60,14 @@ def test_an_interrupt_in_code_made_from_text_ends_with_130(tmp_path: Path) -> No
         [sys.executable, "-P", "-c", words], cwd=tmp_path, env=surroundings(tmp_path), capture_output=True, check=False
     )
     assert (done.returncode, done.stdout, done.stderr) == (130, b"", b"")
+
+
+@pytest.mark.parametrize("method", ["worst-case", "rss"])
+@pytest.mark.parametrize("ohm", ["1e-18 ohm", "9e14 ohm"])
+def test_a_shunt_beyond_all_proportion_is_no_traceback(ohm: str, method: str, run: Run, tmp_path: Path) -> None:
+    """A figure that cannot be computed with ends in a verdict or a refusal in words."""
+    shunt = f'{{resistance = "{ohm}", tolerance = "1 %", tempco = "50 ppm/K", power = "1 W"}}'
+    (tmp_path / "d.toml").write_text(f'shunts = [{shunt}]\namplifier = "AMP-F50"\n', encoding="utf-8")
+    done = run("check", PUMP, "d.toml", "--set", f"accuracy.method={method}")
+    assert done.returncode in (1, 3)
+    assert done.stdout or done.stderr.startswith("a figure of a part or of the spec")

@@ -4,6 +4,7 @@ from __future__ import annotations
 
 from typing import TYPE_CHECKING
 
+from tests.scenario.glossary import limits, terms
 from tests.scenario.readme import README, printed, timeless
 
 if TYPE_CHECKING:
@@ -15,3 +16,10 @@ def test_every_example_shows_real_output(tmp_path: Path) -> None:
     text = README.read_text(encoding="utf-8")
     assert "```console" in text
     assert timeless(printed(text, tmp_path)) == timeless(text)
+
+
+def test_readme_explains_every_limit_and_every_error_term() -> None:
+    """The two tables of README.md say of each limit and each term what its file says, in the same order."""
+    text = README.read_text(encoding="utf-8")
+    assert limits() in text
+    assert terms() in text

@@ -3,6 +3,7 @@
 from __future__ import annotations
 
 import json
+import tomllib
 from pathlib import Path
 
 import pytest
@@ -11,6 +12,7 @@ from hypothesis import strategies as st
 
 from selector.errors import InputRefused
 from selector.spec import KEYS, entries, load_spec, schema, spec_of, template
+from selector.spec.judge import flat
 from selector.spec.load import override_value
 from selector.units import exact
 
@@ -109,9 +111,17 @@ def test_the_optional_keys_of_the_template_load_too(tmp_path: Path) -> None:
     """Each commented entry of a new spec, put in force alone, is valid beside the others but for those of a rule."""
     ruled = ("overload", "overload_time", "bands")
     lines = template({}).splitlines()
+    tried = []
     for number, line in enumerate(lines):
-        if line.startswith("# ") and " = " in line and line[2:].split(" = ")[0] not in ruled and number > 3:
-            load(tmp_path, "\n".join([*lines[:number], line[2:], *lines[number + 1 :]]))
+        leaf = line[2:].split(" = ")[0]
+        if line.startswith("# ") and " = " in line and leaf not in ruled and number > 3:
+            section = next(head[1:-1] for head in reversed(lines[:number]) if head.startswith("["))
+            read = load(tmp_path, "\n".join([*lines[:number], line[2:], *lines[number + 1 :]]))[section]
+            assert isinstance(read, dict)
+            assert read[leaf] is not None
+            tried.append(f"{section}.{leaf}")
+    stated, _ = flat(tomllib.loads("\n".join(lines)))
+    assert tried == [name for name, key in KEYS.items() if name not in stated and key.leaf not in ruled]
 
 
 def test_the_template_names_every_key() -> None:

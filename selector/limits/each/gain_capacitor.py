@@ -1,4 +1,4 @@
-"""A part that wants a capacitor across its gain resistors cannot be judged yet."""
+"""The amplifier wants no capacitor across its gain resistors; one that does cannot be judged yet."""
 
 from __future__ import annotations
 

@@ -1,4 +1,4 @@
-"""What a gain law can serve."""
+"""The gain law serves the side, the zero and the number of ranges."""
 
 from __future__ import annotations
 

@@ -1,4 +1,4 @@
-"""Figures without which nothing can be judged."""
+"""The amplifier states how fast it is and how high its inputs may go."""
 
 from __future__ import annotations
 

@@ -5,13 +5,11 @@ from __future__ import annotations
 import csv
 import io
 import math
-import re
 
+from selector.guard import guarded
 from selector.report.format import Format
 from selector.report.told import Cell, Told
 
-_FORMULA = re.compile(r"'*[=+\-@\t\r]")
-_NUMBER = re.compile(r"[+-]?(?:[0-9]+(?:[.,][0-9]*)?|[.,][0-9]+)(?:[eE][+-]?[0-9]{1,3})?")
 _END = "\r\n"
 
 
@@ -37,17 +35,6 @@ def _cell(value: Cell) -> str:
     if isinstance(value, bool):
         return "yes" if value else "no"
     return guarded(value) if isinstance(value, str) else repr(value)
-
-
-def guarded(cell: str) -> str:
-    """Return a text that no spreadsheet takes for a formula: with one more `'` where it starts like one.
-
-    Source: OWASP ASVS 4.0.3, requirement 5.3.10 (from memory).
-
-    >>> guarded("=1+1"), guarded("'-x"), guarded("-5"), guarded("S-1R")
-    ("'=1+1", "''-x", '-5', 'S-1R')
-    """
-    return f"'{cell}" if _FORMULA.match(cell) and not _NUMBER.fullmatch(cell) else cell
 
 
 FORMAT = Format("csv", (".csv",), _write)

@@ -122,13 +122,19 @@ def bill_block(offer: Offer) -> Table:
     return Table(columns, tuple(rows), heading=f"bill for {many(offer.boards, 'board')}")
 
 
+def _on_hand(line: BillLine) -> str:
+    if line.on_hand is None:
+        return UNKNOWN
+    return f"{number(line.on_hand)} short" if line.on_hand < line.quantity else number(line.on_hand)
+
+
 def _line(line: BillLine, part: Part | None) -> tuple[str, ...]:
     return (
         line.use,
         line.part,
         line.description if part is None else main_figures(part),
         number(line.quantity),
-        UNKNOWN if line.on_hand is None else number(line.on_hand),
+        _on_hand(line),
         or_unknown(line.unit_cost, MONEY),
         or_unknown(line.line_cost, MONEY),
     )

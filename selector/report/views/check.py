@@ -4,6 +4,7 @@ from __future__ import annotations
 
 from collections.abc import Iterator
 from functools import partial
+from math import fsum, isclose
 
 from selector.candidate import Candidate, Point, Verdict
 from selector.limits import LIMITS
@@ -76,7 +77,7 @@ def _limit(verdict: Verdict) -> tuple[str, ...]:
     return (verdict.limit, *figures, margin, _meets(verdict.meets))
 
 
-def _meets(meets: bool | None) -> str:  # noqa: FBT001  three answers, the third is None
+def _meets(meets: bool | None) -> str:  # noqa: FBT001 - three answers, the third is None
     return "not judged" if meets is None else "yes" if meets else "NO"
 
 
@@ -108,7 +109,14 @@ def terms_block(candidate: Candidate, points: tuple[Point, ...]) -> Table:
     heads = (
         Column(shown(point.current_a, CURRENT), "right", f"range {point.range}" if ranged else "") for point in points
     )
-    return Table((Column("error term"), *heads), tuple(rows), heading="error, in % of the reading")
+    return Table((Column("error term"), *heads), tuple(rows), heading=_heading(points))
+
+
+def _heading(points: tuple[Point, ...]) -> str:
+    """Return what the terms are, and how they make the error where that is not their sum."""
+    summed = all(isclose(fsum(term.amount_a for term in point.terms), point.error_a, rel_tol=1e-6) for point in points)
+    whole = "" if summed else "; limits, which add in squares"
+    return f"error, in % of the reading{whole}"
 
 
 def _amount(amount_a: float, point: Point) -> str:

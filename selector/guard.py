@@ -13,6 +13,9 @@ def guarded(cell: str) -> str:
     """Return a cell as it is written: with one more `'` where it starts like a formula and is no number.
 
     Source: OWASP ASVS 4.0.3, requirement 5.3.10 (from memory): `'` before a cell that a spreadsheet would compute.
+
+    >>> guarded("=1+1"), guarded("'-x"), guarded("-5"), guarded("S-1R")
+    ("'=1+1", "''-x", '-5', 'S-1R')
     """
     return f"'{cell}" if _FORMULA.match(cell) and not _NUMBER.fullmatch(cell) else cell
 
