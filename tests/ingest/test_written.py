@@ -29,7 +29,7 @@ from selector.parts import KINDS, Column, Part, columns
 Load = Callable[..., StockFile]
 
 TEXT = st.text(st.characters(exclude_characters="\x00", exclude_categories=["Cs"]), max_size=20)
-CODE = st.text(st.characters(categories=["L", "N", "P", "S"], max_codepoint=0x24FF), min_size=1, max_size=12)
+CODE = st.text(st.characters(categories=["L", "N", "P", "S"], max_codepoint=0x2FF), min_size=1, max_size=12)
 CODE_LIKE_A_FORMULA = st.sampled_from(["=1+1", "-x", "@a", "+b", "'=c", "''-d", "'e", "-5", "1,5", 'a"b', "a;b"])
 SMALLEST = 1e-300
 
