@@ -28,10 +28,12 @@ def fits(value: Real, allowed: Real) -> Truth:
         finite = isfinite(value) and isfinite(allowed)
         return value <= allowed or (finite and value - allowed <= TOLERANCE * max(abs(value), abs(allowed)))
     value, allowed = np.asarray(value), np.asarray(allowed)
+    below = np.asarray(value <= allowed)
+    if below.all():
+        return below
     both = np.isfinite(value) & np.isfinite(allowed)
     over = np.subtract(value, allowed, where=both, out=np.full(both.shape, np.inf))
-    near = over <= TOLERANCE * np.maximum(np.abs(value), np.abs(allowed))
-    return np.asarray((value <= allowed) | (both & near))
+    return np.asarray(below | (both & (over <= TOLERANCE * np.maximum(np.abs(value), np.abs(allowed)))))
 
 
 @dataclass(frozen=True, slots=True)

@@ -322,3 +322,14 @@ def test_high_side_and_zero_of_a_law_that_reads_its_own_ground() -> None:
     assert _failed(judged)[0] == "law"
     assert "common mode" in _failed(judged)
     assert judged.candidate is not None
+
+
+def test_more_ranges_than_the_spec_allows() -> None:
+    """A design of two ranges does not meet a spec that allows one, and says so in the order of ranges."""
+    path = next(path for path in CASES if path.stem == "ranges_02")
+    case = json.loads(path.read_text(encoding="utf-8"))
+    stock = {kind: tuple(read_part(kind, row, where="") for row in rows) for kind, rows in case["catalogue"].items()}
+    found = search(spec_of(case["spec"]), stock, top=None)
+    of_two = next(one.design for one in found.candidates if one.design.range_count > 1)
+    narrow = judge(spec_of({**case["spec"], "ranges.most": 1}), of_two, stock)
+    assert [one.limit for one in narrow.verdicts if one.meets is False] == ["range order"]

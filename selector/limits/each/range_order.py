@@ -1,10 +1,15 @@
-"""Each range ends above the one below it and has a smaller gain."""
+"""There are as many ranges as the spec allows; each ends above the one below it and has a smaller gain."""
 
 from __future__ import annotations
 
-from selector.candidate import Operating
-from selector.limits.measure import Limit, LinkCheck, Measure
+from selector.candidate import Operating, Pairing
+from selector.limits.measure import Limit, LinkCheck, Measure, PairCheck, flag
 from selector.units import CURRENT
+
+
+def _count(at: Pairing) -> Measure:
+    """There are no more ranges than the spec allows."""
+    return flag(bad=at.range_count > at.conditions.ranges_most)
 
 
 def _borders(at: Operating) -> Measure:
@@ -20,6 +25,7 @@ def _gains(at: Operating) -> Measure:
 LIMIT = Limit(
     "range order",
     (
+        PairCheck(_count),
         LinkCheck(_borders),
         LinkCheck(_gains),
     ),
