@@ -93,6 +93,18 @@ def opened_by_a_reader(pipe: Path) -> int:
     pytest.fail("nobody reads the pipe")
 
 
+def wait_until_it_waits(process: subprocess.Popen[bytes]) -> None:
+    """Return once a process has nothing to do: asleep at five looks in a row. A signal just before it would be late."""
+    asleep = 0
+    for _ in range(3000):
+        state = Path(f"/proc/{process.pid}/stat").read_text(encoding="utf-8").rpartition(")")[2].split()[0]
+        asleep = asleep + 1 if state == "S" else 0
+        if asleep == 5:
+            return
+        time.sleep(0.01)
+    pytest.fail("the command never waits")
+
+
 @pytest.mark.parametrize(
     ("number", "status"),
     [(signal.SIGINT, 130), (signal.SIGTERM, 143), (signal.SIGHUP, 129)],
@@ -109,6 +121,7 @@ def test_signal_ends_a_wait(number: signal.Signals, status: int, tmp_path: Path)
         stdout=subprocess.PIPE,
     )
     pipe = opened_by_a_reader(tmp_path / "pipe")
+    wait_until_it_waits(process)
     process.send_signal(number)
     out, err = process.communicate(timeout=30)
     os.close(pipe)
