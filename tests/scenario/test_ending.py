@@ -5,6 +5,7 @@ from __future__ import annotations
 import errno
 import os
 import pty
+import shlex
 import signal
 import subprocess
 import time
@@ -20,9 +21,9 @@ FULL = Path("/dev/full")
 
 def shell(words: str, folder: Path, catalogue: Path, **more: str) -> subprocess.CompletedProcess[str]:
     """Run a line of the shell in which `$S` is the program."""
-    environment = surroundings(folder, {"SELECTOR_CATALOGUE": str(catalogue), "S": " ".join(command()), **more})
+    environment = surroundings(folder, {"SELECTOR_CATALOGUE": str(catalogue), **more})
     return subprocess.run(
-        ["/bin/bash", "-c", words],
+        ["/bin/bash", "-c", words.replace("$S", shlex.join(command()))],
         cwd=folder,
         env=environment,
         capture_output=True,
