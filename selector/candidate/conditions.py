@@ -6,6 +6,7 @@ from dataclasses import dataclass
 from enum import Enum
 from math import inf
 
+from selector.candidate.elementwise import stated
 from selector.spec import Spec
 
 ZERO_CELSIUS_K = 273.15  # exact by definition of the Celsius temperature; the SI Brochure, 9th edition
@@ -152,8 +153,8 @@ def conditions_of(spec: Spec) -> Conditions:
         two_way=spec.current.two_way,
         current_min_a=spec.current.min,
         current_max_a=spec.current.max,
-        overload_a=_or(spec.current.overload, 0.0),
-        overload_s=_or(spec.current.overload_time, 0.0),
+        overload_a=stated(spec.current.overload, 0.0),
+        overload_s=stated(spec.current.overload_time, 0.0),
         bands=_bands(spec),
         method=spec.accuracy.method,
         coverage=spec.accuracy.coverage,
@@ -162,21 +163,21 @@ def conditions_of(spec: Spec) -> Conditions:
         burden_limit_v=spec.limits.burden,
         power_limit_w=spec.limits.power,
         headroom_limit_frac=spec.limits.headroom,
-        cost_limit=_or(spec.limits.cost, inf),
+        cost_limit=stated(spec.limits.cost, inf),
         load_frac=spec.limits.load_fraction,
         supply_v=spec.supply.voltage,
         supply_tolerance_frac=spec.supply.tolerance,
         high_side=high_side,
-        bus_min_v=_or(spec.sense.bus_min, 0.0) if high_side else 0.0,
-        bus_nominal_v=_or(spec.sense.bus_nominal, 0.0) if high_side else 0.0,
-        bus_max_v=_or(spec.sense.bus_max, 0.0) if high_side else 0.0,
-        stated_bus_v=_or(spec.sense.bus_max, 0.0),
+        bus_min_v=stated(spec.sense.bus_min, 0.0) if high_side else 0.0,
+        bus_nominal_v=stated(spec.sense.bus_nominal, 0.0) if high_side else 0.0,
+        bus_max_v=stated(spec.sense.bus_max, 0.0) if high_side else 0.0,
+        stated_bus_v=stated(spec.sense.bus_max, 0.0),
         lead_ohm=spec.sense.lead,
         output_low_v=spec.output.low,
-        output_high_v=_or(spec.output.high, spec.supply.voltage),
+        output_high_v=stated(spec.output.high, spec.supply.voltage),
         zero_v=spec.output.zero,
-        zero_tolerance_frac=_or(spec.output.zero_tolerance, 0.0),
-        zero_drift_per_k=_or(spec.output.zero_drift, 0.0),
+        zero_tolerance_frac=stated(spec.output.zero_tolerance, 0.0),
+        zero_drift_per_k=stated(spec.output.zero_drift, 0.0),
         bits=spec.converter.bits,
         reference_v=spec.converter.reference,
         reference_tolerance_frac=spec.converter.reference_tolerance,
@@ -186,8 +187,8 @@ def conditions_of(spec: Spec) -> Conditions:
         converter_gain_error_frac=spec.converter.gain_error,
         converter_noise_v=spec.converter.noise,
         converter_input_current_a=spec.converter.input_current,
-        converter_input_ohm=_or(spec.converter.input_resistance, inf),
-        converter_input_max_v=_or(spec.converter.input_max, inf),
+        converter_input_ohm=stated(spec.converter.input_resistance, inf),
+        converter_input_max_v=stated(spec.converter.input_max, inf),
         clamp_current_a=spec.converter.clamp_current,
         average=float(spec.converter.average),
         ambient_min_degc=spec.ambient.min,
@@ -195,7 +196,7 @@ def conditions_of(spec: Spec) -> Conditions:
         ambient_max_degc=spec.ambient.max,
         gradient_k=spec.ambient.gradient,
         bandwidth_hz=spec.signal.bandwidth,
-        settle_s=_or(spec.signal.settle, inf),
+        settle_s=stated(spec.signal.settle, inf),
         ranges_most=spec.ranges.most,
         overlap_frac=spec.ranges.overlap,
         filter_least_ohm=spec.filter.resistance_min,
@@ -207,9 +208,5 @@ def conditions_of(spec: Spec) -> Conditions:
 
 def _bands(spec: Spec) -> tuple[Band, ...]:
     if spec.accuracy.bands is None:
-        return (Band(inf, _or(spec.accuracy.reading, 0.0), _or(spec.accuracy.floor, 0.0)),)
-    return tuple(Band(_or(band.up_to, inf), band.reading, band.floor) for band in spec.accuracy.bands)
-
-
-def _or(value: float | None, absent: float) -> float:
-    return absent if value is None else value
+        return (Band(inf, stated(spec.accuracy.reading, 0.0), stated(spec.accuracy.floor, 0.0)),)
+    return tuple(Band(stated(band.up_to, inf), band.reading, band.floor) for band in spec.accuracy.bands)

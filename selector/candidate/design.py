@@ -4,7 +4,7 @@ from __future__ import annotations
 
 from collections import Counter
 from dataclasses import dataclass
-from math import ceil
+from math import ceil, inf
 
 from selector.gain import LAWS, Law
 from selector.parts import Amplifier, Capacitor, Part, Resistor, Shunt, Switch
@@ -89,6 +89,11 @@ class Design:
 def in_stock(part: Part) -> int:
     """Return the pieces of a part in stock; a generic part never counts as stock, nor does one that states none."""
     return 0 if part.generic else part.quantity or 0
+
+
+def cost_or_inf(part: Part) -> float:
+    """Return the cost of a part; one that is not known is infinite, since it meets no limit."""
+    return inf if part.unit_cost is None else part.unit_cost
 
 
 def cost_of(design: Design) -> float | None:

@@ -1,4 +1,4 @@
-"""The smaller, the larger and the chosen of numbers or arrays; floats stay floats."""
+"""The smaller, the larger and the chosen of numbers or arrays, floats stay floats; and a number that may be absent."""
 
 from __future__ import annotations
 
@@ -26,3 +26,8 @@ def chosen(condition: Truth, first: Real, second: Real) -> Real:
     if isinstance(condition, bool):
         return first if condition else second
     return np.where(condition, first, second)
+
+
+def stated(value: float | None, absent: float) -> float:
+    """Return a figure, or what stands for one that is not stated."""
+    return absent if value is None else value

@@ -13,6 +13,7 @@ from typing import TypeVar
 
 import numpy as np
 
+from selector.candidate.elementwise import stated
 from selector.gain import LAWS, Law, LawFigures
 from selector.parts import Amplifier, Capacitor, Resistor, Shunt, Switch
 from selector.physics.heat import thermal_resistance_k_per_w
@@ -144,8 +145,8 @@ def shunt_figures(part: Shunt) -> ShuntFigures:
         drift_frac=part.drift,
         thermal_emf_v_per_k=part.thermal_emf,
         heating_k_per_w=by_line if part.thermal_resistance is None else part.thermal_resistance,
-        pulse_energy_j=_or(part.pulse_energy, 0.0),
-        inductance_h=_or(part.inductance, 0.0),
+        pulse_energy_j=stated(part.pulse_energy, 0.0),
+        inductance_h=stated(part.inductance, 0.0),
         terminal_lead=0.0 if part.terminals == FOUR_TERMINALS else 1.0,
     )
 
@@ -166,14 +167,14 @@ def filter_figures(resistor: Resistor, capacitor: Capacitor) -> FilterFigures:
         ohm=resistor.resistance,
         tolerance_frac=resistor.tolerance,
         farad=capacitor.capacitance,
-        farad_tolerance_frac=capacitor.tolerance + _or(capacitor.temp_change, 0.0),
+        farad_tolerance_frac=capacitor.tolerance + stated(capacitor.temp_change, 0.0),
     )
 
 
 def amplifier_figures(part: Amplifier, supply_v: float) -> AmplifierFigures:
     """Return the figures of an amplifier; one that states no test supply was tested at `supply_v`."""
     law = LAWS[part.gain_law]
-    drift = _or(part.bias_current_drift, 0.0) if part.bias_current > 0.0 else 0.0
+    drift = stated(part.bias_current_drift, 0.0) if part.bias_current > 0.0 else 0.0
     return AmplifierFigures(
         law=law,
         of_law=_law_figures(part),
@@ -193,17 +194,17 @@ def amplifier_figures(part: Amplifier, supply_v: float) -> AmplifierFigures:
         output_noise_v_per_rthz=part.output_noise_density,
         current_noise_a_per_rthz=part.current_noise_density,
         low_frequency_noise_v=part.low_frequency_noise,
-        gain_bandwidth_hz=_or(part.gain_bandwidth, inf),
-        bandwidth_hz=_or(part.bandwidth, inf),
+        gain_bandwidth_hz=stated(part.gain_bandwidth, inf),
+        bandwidth_hz=stated(part.bandwidth, inf),
         swing_high_v=part.swing_high,
         swing_low_v=part.swing_low,
         common_mode_min_v=part.common_mode_min,
-        common_mode_max_v=_or(part.common_mode_max, inf),
-        common_mode_top_gap_v=_or(part.common_mode_top_gap, -inf),
+        common_mode_max_v=stated(part.common_mode_max, inf),
+        common_mode_top_gap_v=stated(part.common_mode_top_gap, -inf),
         common_mode_test_v=part.common_mode_test,
-        supply_test_v=_or(part.supply_test, supply_v),
-        input_max_v=_or(part.input_max, inf),
-        slew_v_per_s=_or(part.slew_rate, inf),
+        supply_test_v=stated(part.supply_test, supply_v),
+        input_max_v=stated(part.input_max, inf),
+        slew_v_per_s=stated(part.slew_rate, inf),
         supply_min_v=part.supply_min,
         supply_max_v=part.supply_max,
         supply_a=part.supply_current,
@@ -211,22 +212,22 @@ def amplifier_figures(part: Amplifier, supply_v: float) -> AmplifierFigures:
         temp_max_degc=part.temp_max,
         reference_pin=float(part.reference_pin),
         gain_capacitor=float(part.gain_capacitor),
-        least_common_ohm=_or(part.resistance_min, law.least_common_ohm),
-        least_switched_ohm=_or(part.resistance_min, law.least_switched_ohm),
-        most_ohm=_or(part.resistance_max, law.most_ohm),
+        least_common_ohm=stated(part.resistance_min, law.least_common_ohm),
+        least_switched_ohm=stated(part.resistance_min, law.least_switched_ohm),
+        most_ohm=stated(part.resistance_max, law.most_ohm),
     )
 
 
 def _law_figures(part: Amplifier) -> LawFigures:
     return LawFigures(
-        fixed_gain=_or(part.gain, 0.0),
-        gain_base=_or(part.gain_base, 1.0),
-        gain_resistance_ohm=_or(part.gain_resistance, 0.0),
-        gain_factor=_or(part.gain_factor, 0.0),
-        transconductance_s=_or(part.transconductance, 0.0),
+        fixed_gain=stated(part.gain, 0.0),
+        gain_base=stated(part.gain_base, 1.0),
+        gain_resistance_ohm=stated(part.gain_resistance, 0.0),
+        gain_factor=stated(part.gain_factor, 0.0),
+        transconductance_s=stated(part.transconductance, 0.0),
         buffered=float(part.buffered),
         bias_a=part.bias_current,
-        offset_current_a=_or(part.offset_current, part.bias_current),
+        offset_current_a=stated(part.offset_current, part.bias_current),
         output_bias_a=part.output_bias_current,
     )
 
@@ -234,7 +235,3 @@ def _law_figures(part: Amplifier) -> LawFigures:
 def _ratio(decibel: float) -> float:
     """Return a voltage ratio given in dB: 10^(dB/20); definition of the decibel, IEC 60027-3."""
     return float(10.0 ** (decibel / 20.0))
-
-
-def _or(value: float | None, absent: float) -> float:
-    return absent if value is None else value

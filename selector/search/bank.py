@@ -9,7 +9,7 @@ import numpy as np
 from numpy.typing import NDArray
 
 from selector.candidate import Conditions, Design, Operating, cost_of
-from selector.candidate.design import in_stock
+from selector.candidate.design import cost_or_inf, in_stock
 from selector.candidate.figures import FilterFigures, filter_figures, stacked
 from selector.limits import LIMITS, FilterCheck
 from selector.limits.measure import ChoiceAt, ChoiceCheck
@@ -111,8 +111,8 @@ def bank_of(
         stacked(each) if each else None,
         np.array([_held(resistor, exempt) for resistor, _ in pairs]),
         np.array([_held(capacitor, exempt) for _, capacitor in pairs]),
-        np.array([_cost(resistor) for resistor, _ in pairs]),
-        np.array([_cost(capacitor) for _, capacitor in pairs]),
+        np.array([cost_or_inf(resistor) for resistor, _ in pairs]),
+        np.array([cost_or_inf(capacitor) for _, capacitor in pairs]),
         _rows([resistor.part for resistor, _ in pairs]),
     )
 
@@ -126,7 +126,3 @@ def _rows(codes: list[str]) -> dict[str, NDArray[np.int64]]:
 
 def _held(part: Resistor | Capacitor, exempt: frozenset[tuple[str, str]]) -> float:
     return float("inf") if (part.kind, part.part) in exempt else float(in_stock(part))
-
-
-def _cost(part: Resistor | Capacitor) -> float:
-    return float("inf") if part.unit_cost is None else part.unit_cost

@@ -4,13 +4,12 @@ from __future__ import annotations
 
 from collections.abc import Iterator
 from dataclasses import replace
-from math import ceil, inf, isfinite
+from math import ceil, isfinite
 
 import numpy as np
 
 from selector.candidate import Operating
-from selector.candidate.design import in_stock
-from selector.parts import Part
+from selector.candidate.design import cost_or_inf, in_stock
 from selector.search.bench import Bench
 from selector.search.drafts import Draft, Thread, layered
 from selector.search.filtering import stretches
@@ -76,12 +75,8 @@ def _settled(bench: Bench, frame: Frame, place: int) -> bool:
         return False
     if not isfinite(conditions.cost_limit):
         return True
-    dearest = max((_cost(part) for part in bench.shelf.resistors), default=0.0)
+    dearest = max((cost_or_inf(part) for part in bench.shelf.resistors), default=0.0)
     switch = frame.switch
-    switches = 0.0 if switch is None else ceil(frame.range_count / switch.channels) * _cost(switch)
-    fixed = sum(_cost(part) for part in (frame.shunt, frame.amplifier, resistor, capacitor))
+    switches = 0.0 if switch is None else ceil(frame.range_count / switch.channels) * cost_or_inf(switch)
+    fixed = sum(cost_or_inf(part) for part in (frame.shunt, frame.amplifier, resistor, capacitor))
     return most_uses * dearest + switches + fixed <= conditions.cost_limit
-
-
-def _cost(part: Part) -> float:
-    return inf if part.unit_cost is None else part.unit_cost

@@ -24,6 +24,8 @@ from selector.search.nodes import (
 )
 from selector.search.stand_in import StandIn
 
+TWO = 2  # ranges that are neighbours: there is none between the first and the last
+
 
 @dataclass(frozen=True, slots=True)
 class Draft:
@@ -51,11 +53,12 @@ def draft_of(bench: Bench, frame: Frame) -> Draft | None:
     if not len(inner):
         return None
     if bench.needs_filter:
-        below = _kept_stand_in(bench, frame, last=frame.range_count == 1)
         above = _kept_stand_in(bench, frame, last=True)
+        below = above if frame.range_count == 1 else _kept_stand_in(bench, frame, last=False)
         if below is None or above is None:
             return None
-        inner, last = with_stand_in(below, inner), with_stand_in(above, last)
+        last = with_stand_in(above, last)
+        inner = last if frame.range_count == 1 else with_stand_in(below, inner)
     return layered(bench, frame, None, Thread(inner, inner, last))
 
 
@@ -83,17 +86,19 @@ def layered(bench: Bench, frame: Frame, place: int | None, nodes: Thread) -> Dra
 
     The filter of `place`, or a stand-in, is in.
     """
-    lowest, use = _lowest(bench, nodes.first)
+    lowest, first_use = _lowest(bench, nodes.first)
     if not len(lowest.nodes):
         return None
     layers: tuple[Judged, ...] = (lowest,)
+    use = first_use
     if frame.range_count > 1:
-        highest = _beside(bench, nodes.last, lowest)
-        between = [_beside(bench, nodes.inner, lowest)] * (frame.range_count - 2)
-        layers = (lowest, *between, highest)
+        highest, use = _beside(bench, nodes.last, lowest)
+        between = _beside(bench, nodes.inner, lowest)[0] if frame.range_count > TWO else lowest
+        layers = (lowest, *[between] * (frame.range_count - TWO), highest)
     if not all(len(layer.nodes) for layer in layers):
         return None
-    return _bounded(bench, Draft(frame, place, use, layers, np.empty(0, dtype=np.int64), np.empty(0)))
+    commons, bound = _bounds(bench, frame, layers, (first_use, use))
+    return Draft(frame, place, first_use, layers, commons, bound) if len(commons) else None
 
 
 def _lowest(bench: Bench, first: Nodes) -> tuple[Judged, Numbers]:
@@ -110,27 +115,31 @@ def _served(bench: Bench, ranges: Judged, use: Numbers) -> tuple[Judged, Numbers
     return (ranges, use) if len(kept) == count else (ranges.pick(kept), use[kept])
 
 
-def _beside(bench: Bench, nodes: Nodes, lowest: Judged) -> Judged:
-    """Return ranges that share a common resistor with some first range and are allowed at their upper border."""
+def _beside(bench: Bench, nodes: Nodes, lowest: Judged) -> tuple[Judged, Numbers]:
+    """Return ranges that share a common resistor with some first range and are allowed at their upper border.
+
+    With the use of each at that border.
+    """
     ranges = judged(bench, nodes.where(np.isin(nodes.common, np.unique(lowest.nodes.common))))
     use = top_use(bench, ranges)
     standing = np.flatnonzero(np.isfinite(use))
-    return _served(bench, ranges.pick(standing), use[standing])[0]
+    return _served(bench, ranges.pick(standing), use[standing])
 
 
-def _bounded(bench: Bench, draft: Draft) -> Draft | None:
-    """Return the draft with a bound for each common resistor: the best first range beside the best last one."""
-    lowest, last = draft.layers[0], draft.layers[-1]
+def _bounds(
+    bench: Bench, frame: Frame, layers: tuple[Judged, ...], uses: tuple[Numbers, Numbers]
+) -> tuple[Indices, Numbers]:
+    """Return the common resistors with a bound for each, rising: the best first range beside the best last one.
+
+    `uses` holds the uses of the first ranges, and of the last ones at their upper border.
+    """
+    lowest, last = layers[0], layers[-1]
     size = int(max(lowest.nodes.common.max(), last.nodes.common.max())) + 2
     least_first = np.full(size, np.inf)
-    np.minimum.at(least_first, lowest.nodes.common, draft.first_use)
-    use = draft.first_use if len(draft.layers) == 1 else top_use(bench, last)
-    use = np.maximum(use, least_first[last.nodes.common])
-    figure = bench.figure(last.power, draft.frame.burden, last.headroom, use)
+    np.minimum.at(least_first, lowest.nodes.common, uses[0])
+    figure = bench.figure(last.power, frame.burden, last.headroom, np.maximum(uses[1], least_first[last.nodes.common]))
     bound = np.full(size, np.inf)
     np.minimum.at(bound, last.nodes.common, figure)
     commons = np.flatnonzero(np.isfinite(bound))
-    if not len(commons):
-        return None
     order = commons[np.argsort(bound[commons], kind="stable")]
-    return replace(draft, commons=np.where(order == size - 1, NONE, order), bound=bound[order])
+    return np.where(order == size - 1, NONE, order), bound[order]

@@ -101,7 +101,7 @@ class Grid:
             rows,
             columns,
             stands,
-            _on(pairing, bench.resistors, rows, columns, last=last),
+            _on(pairing, bench.resistors, rows[:, None], columns[None, :], last=last),
         )
 
     def kept(self, stands: Truths) -> Grid:
@@ -110,24 +110,23 @@ class Grid:
         rows, columns = both.any(axis=1), both.any(axis=0)
         if rows.all() and columns.all():
             return replace(self, stands=both)
-        left = self.rows[rows], self.columns[columns]
-        at = _on(self.pairing, self.resistors, *left, last=self.last)
-        return replace(self, rows=left[0], columns=left[1], stands=both[np.ix_(rows, columns)], at=at)
+        rows_left, columns_left = self.rows[rows], self.columns[columns]
+        at = _on(self.pairing, self.resistors, rows_left[:, None], columns_left[None, :], last=self.last)
+        return replace(self, rows=rows_left, columns=columns_left, stands=both[np.ix_(rows, columns)], at=at)
 
     def nodes(self) -> Nodes:
         """Return what stands, one node each, with the sum that a zero calibration removes."""
         places = np.nonzero(self.stands)
         rows, columns = self.rows[places[0]], self.columns[places[1]]
-        common = NO_RESISTOR if self.pairing.amplifier.law.common_name is None else picked(self.resistors, rows)
-        switched = NO_RESISTOR if self.pairing.amplifier.law.switched_name is None else picked(self.resistors, columns)
-        at = zeroed(self.pairing.operate(common, switched, last=self.last))
+        at = zeroed(_on(self.pairing, self.resistors, rows, columns, last=self.last))
         return Nodes(_flattened(at, len(rows)), rows, columns)
 
 
 def _on(pairing: Pairing, resistors: ResistorFigures, rows: Indices, columns: Indices, *, last: bool) -> Operating:
+    """Return the ranges with common and switched resistors by their indices, in the shape of the indices."""
     law = pairing.amplifier.law
-    common = NO_RESISTOR if law.common_name is None else shaped(picked(resistors, rows), (-1, 1))
-    switched = NO_RESISTOR if law.switched_name is None else shaped(picked(resistors, columns), (1, -1))
+    common = NO_RESISTOR if law.common_name is None else picked(resistors, rows)
+    switched = NO_RESISTOR if law.switched_name is None else picked(resistors, columns)
     return pairing.operate(common, switched, last=last)
 
 

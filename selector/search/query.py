@@ -7,7 +7,7 @@ from dataclasses import replace
 from math import isinf
 from time import perf_counter
 
-from selector.candidate import Candidate, Design, Verdict, conditions_of
+from selector.candidate import Candidate, Design, Verdict
 from selector.candidate.chain import Chain
 from selector.limits import LIMITS
 from selector.parts import Part
@@ -51,7 +51,7 @@ def search(
     Engine(bench, standing, progress).run(pairs)
     candidates = tuple(present(placed.chain, score) for placed in standing.best())
     empty = None if candidates else nothing_fits(bench, score, pairs, progress)
-    searched = _searched(bench, bench.counts[EVALUATED], perf_counter() - started)
+    searched = _searched(bench, perf_counter() - started)
     return Found(_ranked(candidates), searched, empty)
 
 
@@ -71,7 +71,7 @@ def _four(candidate: Candidate) -> tuple[float, float, float, float]:
     return uses.power, uses.burden, uses.headroom, uses.error
 
 
-def _searched(bench: Bench, evaluated: int, seconds: float) -> Searched:
+def _searched(bench: Bench, seconds: float) -> Searched:
     shelf = bench.shelf
     return Searched(
         shunts=len(shelf.shunts),
@@ -82,7 +82,7 @@ def _searched(bench: Bench, evaluated: int, seconds: float) -> Searched:
         filter_pairs=len(bench.bank.pairs),
         combinations=combinations(shelf, len(bench.bank.pairs)),
         left_out=shelf.left_out,
-        evaluated=evaluated,
+        evaluated=bench.counts[EVALUATED],
         seconds=seconds,
     )
 
@@ -105,7 +105,7 @@ def judge(spec: Spec, design: Design, stock: Stock, *, exempt: frozenset[tuple[s
     A filter part that the design leaves open is chosen from the stock as the search chooses it.
     """
     shelf = shelf_of(spec, stock)
-    chain = chain_of(conditions_of(spec), in_one_currency(design, stock), exempt)
+    chain = chain_of(shelf.conditions, in_one_currency(design, stock), exempt)
     failed: str | None = None
     if not _figures_exist(chain):
         chain = replace(chain, filtered=False)
