@@ -24,9 +24,9 @@ from selector.real import Real
 class Window:
     """The output voltages that can be used, V, and the span a current may take of them, V."""
 
-    low_v: float
-    high_v: float
-    span_v: float
+    low_v: Real
+    high_v: Real
+    span_v: Real
 
 
 @dataclass(frozen=True, slots=True)
@@ -211,14 +211,20 @@ class Pairing:
         """Return the largest drop in the current's path, V."""
         return ShuntAt(self.conditions, self.shunt).burden_v
 
+    @property
+    def usable_v(self) -> Real:
+        """Return what the least headroom leaves of the span, V."""
+        return (1.0 - self.conditions.headroom_limit_frac) * self.window.span_v
+
     def operate(self, common: ResistorFigures, switched: ResistorFigures, *, last: bool) -> Operating:
         """Return a range with its gain and its upper border: I_max for the last, else where headroom ends."""
-        law = self.amplifier.law
-        on_ohm = self.switch.on_ohm
-        gain = law.gain(self.amplifier.of_law, common.ohm, switched.ohm, on_ohm)
-        stage = Stage(self.amplifier.of_law, self.shunt.ohm, common.ohm, switched.ohm, on_ohm, gain)
-        usable_v = (1.0 - self.conditions.headroom_limit_frac) * self.window.span_v
-        high_a = self.conditions.current_max_a + 0.0 * gain if last else usable_v / (gain * self.shunt.ohm)
+        gain = self.amplifier.law.gain(self.amplifier.of_law, common.ohm, switched.ohm, self.switch.on_ohm)
+        return self.operate_at(gain, common, switched, last=last)
+
+    def operate_at(self, gain: Real, common: ResistorFigures, switched: ResistorFigures, *, last: bool) -> Operating:
+        """Return a range with a gain that is known to be the one that its resistors give."""
+        stage = Stage(self.amplifier.of_law, self.shunt.ohm, common.ohm, switched.ohm, self.switch.on_ohm, gain)
+        high_a = self.conditions.current_max_a + 0.0 * gain if last else self.usable_v / (gain * self.shunt.ohm)
         return Operating(
             conditions=self.conditions,
             shunt=self.shunt,

@@ -20,6 +20,11 @@ class CurrentOutput(Law):
         del common_ohm
         return figures.transconductance_s * (switched_ohm + on_ohm)
 
+    def switched_ohm(self, figures: LawFigures, gain: Real, common_ohm: Real, on_ohm: Real) -> Real:
+        """Return G / transconductance - Ron, ohm."""
+        del common_ohm
+        return gain / figures.transconductance_s - on_ohm
+
     def switched_sensitivity(self, stage: Stage) -> Real:
         """Return RL / (RL + Ron)."""
         return stage.switched_ohm / stage.branch_ohm

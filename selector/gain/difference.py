@@ -24,6 +24,11 @@ class Difference(Law):
         del figures, on_ohm
         return switched_ohm / common_ohm
 
+    def switched_ohm(self, figures: LawFigures, gain: Real, common_ohm: Real, on_ohm: Real) -> Real:
+        """Return G R1, ohm."""
+        del figures, on_ohm
+        return gain * common_ohm
+
     def common_sensitivity(self, stage: Stage) -> Real:
         """Return -1."""
         return -1.0 + 0.0 * stage.gain

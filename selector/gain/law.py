@@ -69,6 +69,11 @@ class Law(ABC):
     def gain(self, figures: LawFigures, common_ohm: Real, switched_ohm: Real, on_ohm: Real) -> Real:
         """Return the nominal gain in V/V."""
 
+    def switched_ohm(self, figures: LawFigures, gain: Real, common_ohm: Real, on_ohm: Real) -> Real:
+        """Return the switched resistor that gives a gain beside a common one, ohm: `gain` turned round."""
+        del figures
+        return 0.0 * (gain + common_ohm + on_ohm)
+
     def common_sensitivity(self, stage: Stage) -> Real:
         """Return d ln G / d ln R of the common resistor."""
         return 0.0 * stage.gain

@@ -26,6 +26,11 @@ class NonInverting(Law):
         del figures
         return 1.0 + common_ohm / (switched_ohm + on_ohm)
 
+    def switched_ohm(self, figures: LawFigures, gain: Real, common_ohm: Real, on_ohm: Real) -> Real:
+        """Return Rf / (G - 1) - Ron, ohm."""
+        del figures
+        return common_ohm / (gain - 1.0) - on_ohm
+
     def common_sensitivity(self, stage: Stage) -> Real:
         """Return 1 - 1/G."""
         return 1.0 - 1.0 / stage.gain

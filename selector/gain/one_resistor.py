@@ -22,6 +22,11 @@ class OneResistor(Law):
         del common_ohm
         return figures.gain_base + figures.gain_resistance_ohm / (switched_ohm + on_ohm)
 
+    def switched_ohm(self, figures: LawFigures, gain: Real, common_ohm: Real, on_ohm: Real) -> Real:
+        """Return gain_resistance / (G - gain_base) - Ron, ohm."""
+        del common_ohm
+        return figures.gain_resistance_ohm / (gain - figures.gain_base) - on_ohm
+
     def switched_sensitivity(self, stage: Stage) -> Real:
         """Return -(1 - gain_base/G) Rg / (Rg + Ron)."""
         return -self._set_share(stage) * stage.switched_ohm / stage.branch_ohm

@@ -21,6 +21,10 @@ class TwoResistor(Law):
         """Return gain_factor (R2 + Ron) / R1 in V/V."""
         return figures.gain_factor * (switched_ohm + on_ohm) / common_ohm
 
+    def switched_ohm(self, figures: LawFigures, gain: Real, common_ohm: Real, on_ohm: Real) -> Real:
+        """Return G R1 / gain_factor - Ron, ohm."""
+        return gain * common_ohm / figures.gain_factor - on_ohm
+
     def common_sensitivity(self, stage: Stage) -> Real:
         """Return -1."""
         return -1.0 + 0.0 * stage.gain

@@ -86,7 +86,7 @@ def complete(chain: Chain, bank: FilterBank, lifted: frozenset[str] = frozenset(
     index = bank.choose(chain.ranges, bank.beside(chain.design, chain.exempt), lifted)
     if isinstance(index, str):
         return index
-    resistor, capacitor = bank.pairs[index]
+    resistor, capacitor = bank.pair(index)
     return _filtered(chain, replace(chain.design, filter_resistor=resistor, filter_capacitor=capacitor))
 
 

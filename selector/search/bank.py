@@ -10,25 +10,41 @@ from numpy.typing import NDArray
 
 from selector.candidate import Conditions, Design, Operating, cost_of
 from selector.candidate.design import cost_or_inf, in_stock
-from selector.candidate.figures import FilterFigures, filter_figures, stacked
+from selector.candidate.figures import FilterFigures, filter_figures
 from selector.limits import LIMITS, FilterCheck
 from selector.limits.measure import ChoiceAt, ChoiceCheck
 from selector.parts import Capacitor, Resistor
 from selector.search.order import NEARLY, cost_key, rounded
+from selector.search.stacks import stacked
 
 
 @dataclass(frozen=True, slots=True)
 class FilterBank:
-    """All filter pairs with their figures as arrays of shape (pairs,)."""
+    """All filter pairs with their figures as arrays of shape (pairs,): each resistor with every capacitor in turn."""
 
     conditions: Conditions
-    pairs: tuple[tuple[Resistor, Capacitor], ...]
+    resistors: tuple[Resistor, ...]
+    capacitors: tuple[Capacitor, ...]
     figures: FilterFigures | None
     held_resistors: NDArray[np.float64]
     held_capacitors: NDArray[np.float64]
     resistor_costs: NDArray[np.float64]
     capacitor_costs: NDArray[np.float64]
-    resistor_rows: dict[str, NDArray[np.int64]]  # the pairs that each resistor stands in
+    rows: dict[str, int]  # the place of each resistor
+
+    def __len__(self) -> int:
+        """Return the number of pairs."""
+        return len(self.resistors) * len(self.capacitors)
+
+    @property
+    def pairs(self) -> tuple[tuple[Resistor, Capacitor], ...]:
+        """Return every pair."""
+        return tuple(self.pair(index) for index in range(len(self)))
+
+    def pair(self, index: int) -> tuple[Resistor, Capacitor]:
+        """Return the parts of a pair."""
+        row, column = divmod(index, len(self.capacitors))
+        return self.resistors[row], self.capacitors[column]
 
     def choose(
         self,
@@ -43,7 +59,7 @@ class FilterBank:
         """
         if self.figures is None:
             return next(limit.name for limit in LIMITS if limit.thins)
-        left = np.ones(len(self.pairs), dtype=bool)
+        left = np.ones(len(self), dtype=bool)
         filtered = [at.with_filter(self.figures) for at in ranges]
         for limit in LIMITS:
             if not limit.thins or limit.name in lifted:
@@ -68,24 +84,24 @@ class FilterBank:
         return min((int(index) for index in near), key=lambda index: self._key(index, float(slow_hz[index])))
 
     def _key(self, index: int, slow_hz: float) -> tuple[float, float, tuple[bool, float], str, str]:
-        resistor, capacitor = self.pairs[index]
+        resistor, capacitor = self.pair(index)
         known = resistor.unit_cost is not None and capacitor.unit_cost is not None
         cost = (resistor.unit_cost or 0.0) + (capacitor.unit_cost or 0.0) if known else None
         return rounded(slow_hz), -rounded(resistor.resistance), cost_key(cost), resistor.part, capacitor.part
 
     def beside(self, design: Design, exempt: frozenset[tuple[str, str]]) -> ChoiceAt:
         """Return every pair beside the rest of a design: uses of both its parts on one board, and the whole cost."""
-        resistor_uses = np.ones(len(self.pairs))
-        capacitor_uses = np.ones(len(self.pairs))
+        resistor_uses = np.ones((len(self.resistors), len(self.capacitors)))
+        capacitor_uses = np.ones(len(self))
         for (kind, code), pieces in design.uses().items():
-            if kind == Resistor.kind and code in self.resistor_rows:
-                resistor_uses[self.resistor_rows[code]] += pieces
+            if kind == Resistor.kind and code in self.rows:
+                resistor_uses[self.rows[code]] += pieces
         cost = cost_of(design)
         return ChoiceAt(
             conditions=self.conditions,
             design=design,
             exempt=exempt,
-            resistor_uses=resistor_uses,
+            resistor_uses=resistor_uses.ravel(),
             capacitor_uses=capacitor_uses,
             held_resistors=self.held_resistors,
             held_capacitors=self.held_capacitors,
@@ -103,25 +119,30 @@ def bank_of(
 
     A part whose cost is unknown costs infinitely much; of one in `exempt`, (kind, code), there is any number.
     """
-    pairs = tuple((resistor, capacitor) for resistor in resistors for capacitor in capacitors)
-    each = [filter_figures(resistor, capacitor) for resistor, capacitor in pairs]
     return FilterBank(
         conditions,
-        pairs,
-        stacked(each) if each else None,
-        np.array([_held(resistor, exempt) for resistor, _ in pairs]),
-        np.array([_held(capacitor, exempt) for _, capacitor in pairs]),
-        np.array([cost_or_inf(resistor) for resistor, _ in pairs]),
-        np.array([cost_or_inf(capacitor) for _, capacitor in pairs]),
-        _rows([resistor.part for resistor, _ in pairs]),
+        tuple(resistors),
+        tuple(capacitors),
+        _figures(resistors, capacitors),
+        np.repeat([_held(resistor, exempt) for resistor in resistors], len(capacitors)),
+        np.tile([_held(capacitor, exempt) for capacitor in capacitors], len(resistors)),
+        np.repeat([cost_or_inf(resistor) for resistor in resistors], len(capacitors)),
+        np.tile([cost_or_inf(capacitor) for capacitor in capacitors], len(resistors)),
+        {resistor.part: row for row, resistor in enumerate(resistors)},
     )
 
 
-def _rows(codes: list[str]) -> dict[str, NDArray[np.int64]]:
-    rows: dict[str, list[int]] = {}
-    for index, code in enumerate(codes):
-        rows.setdefault(code, []).append(index)
-    return {code: np.array(indices, dtype=np.int64) for code, indices in rows.items()}
+def _figures(resistors: Sequence[Resistor], capacitors: Sequence[Capacitor]) -> FilterFigures | None:
+    if not resistors or not capacitors:
+        return None
+    by_resistor = stacked([filter_figures(resistor, capacitors[0]) for resistor in resistors])
+    by_capacitor = stacked([filter_figures(resistors[0], capacitor) for capacitor in capacitors])
+    return FilterFigures(
+        ohm=np.repeat(by_resistor.ohm, len(capacitors)),
+        tolerance_frac=np.repeat(by_resistor.tolerance_frac, len(capacitors)),
+        farad=np.tile(by_capacitor.farad, len(resistors)),
+        farad_tolerance_frac=np.tile(by_capacitor.farad_tolerance_frac, len(resistors)),
+    )
 
 
 def _held(part: Resistor | Capacitor, exempt: frozenset[tuple[str, str]]) -> float:

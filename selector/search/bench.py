@@ -10,13 +10,15 @@ import numpy as np
 from numpy.typing import NDArray
 
 from selector.candidate import Conditions
-from selector.candidate.figures import ResistorFigures, resistor_figures, stacked
 from selector.limits import LIMITS, FilterCheck, Limit, PointCheck
+from selector.limits.each.headroom import LIMIT as HEADROOM
 from selector.limits.each.range_order import LIMIT as RANGE_ORDER
 from selector.search.bank import FilterBank, bank_of
+from selector.search.ladder import Ladder, ladder_of
+from selector.search.lots import Stock, stock_of
 from selector.search.objective import Objective
+from selector.search.resistors import Resistors, resistors_of
 from selector.search.shelf import Shelf
-from selector.search.stand_in import StandIn
 
 ALL_LIMITS = frozenset(limit.name for limit in LIMITS)
 ORDER = RANGE_ORDER.name
@@ -28,13 +30,14 @@ class Bench:
 
     shelf: Shelf
     bank: FilterBank
-    resistors: ResistorFigures
+    stock: Stock | None
+    resistors: Resistors
     objective: Objective
     held: frozenset[str] = ALL_LIMITS
     counts: Counter[str] = field(default_factory=Counter, compare=False)  # what was done, over all searches of a bench
-    stand_ins: dict[tuple[object, ...], StandIn | None] = field(
+    enough: dict[tuple[str, frozenset[str]], NDArray[np.bool_]] = field(
         default_factory=dict, compare=False
-    )  # many frames share
+    )  # resistors in number, by law
 
     @property
     def conditions(self) -> Conditions:
@@ -45,6 +48,11 @@ class Bench:
     def lifted(self) -> frozenset[str]:
         """Return the limits that are not held."""
         return ALL_LIMITS - self.held
+
+    @cached_property
+    def ladder(self) -> Ladder | None:
+        """Return the filters in the order of choice; None where none could serve."""
+        return None if self.stock is None else ladder_of(self.bank, self.stock.fastest(), self.lifted)
 
     @cached_property
     def limits(self) -> tuple[Limit, ...]:
@@ -69,8 +77,17 @@ class Bench:
         """Return whether borders and gains are held to their strict order."""
         return ORDER in self.held
 
+    @cached_property
+    def holds_headroom(self) -> bool:
+        """Return whether the last range is held to its headroom."""
+        return HEADROOM.name in self.held
+
     def figure(
-        self, power: NDArray[np.float64], burden: float, headroom: NDArray[np.float64], error: NDArray[np.float64]
+        self,
+        power: NDArray[np.float64],
+        burden: NDArray[np.float64],
+        headroom: NDArray[np.float64],
+        error: NDArray[np.float64],
     ) -> NDArray[np.float64]:
         """Return the objective, infinite where the error is: a combination that is out has no figure."""
         figure = np.asarray(self.objective.of(power, burden, headroom, error), dtype=float)
@@ -79,10 +96,10 @@ class Bench:
 
 def bench_of(shelf: Shelf, objective: Objective) -> Bench:
     """Return the set-up of a search under all limits."""
-    resistors = [resistor_figures(part) for part in shelf.resistors]
     return Bench(
         shelf,
         bank_of(shelf.conditions, shelf.resistors, shelf.capacitors),
-        stacked(resistors) if resistors else ResistorFigures(*[np.empty(0)] * 3),
+        stock_of(shelf),
+        resistors_of(shelf.resistors, shelf.conditions.temperature_change_k),
         objective,
     )

@@ -1,82 +1,56 @@
-"""A draft, taken apart by the filter that its ranges really take, and by its common resistor."""
+"""How finely a bound looks: cells of an inner range's upper border, and of a last range's gain."""
 
 from __future__ import annotations
 
-from collections.abc import Iterator
-from dataclasses import replace
-from math import ceil, isfinite
+from dataclasses import dataclass
+from functools import cached_property
 
 import numpy as np
+from numpy.typing import NDArray
 
-from selector.candidate import Operating
-from selector.candidate.design import cost_or_inf, in_stock
-from selector.search.bench import Bench
-from selector.search.drafts import Draft, Thread, layered
-from selector.search.filtering import stretches
-from selector.search.frames import Frame
-from selector.search.layers import Layers
-from selector.search.nodes import Indices, Nodes
-from selector.search.pick import picked
+from selector.budget import allowed_a, allowed_at, breaks
+from selector.candidate import Conditions
+from selector.search.interval import Interval
 
-
-def cells_of(bench: Bench, draft: Draft) -> Iterator[Draft]:
-    """Yield drafts with their filter in where it is certain, and one with the stand-in for what is left.
-
-    Where the network adds resistance before the filter, the choice hangs on first and last range together: such a
-    draft stays as it is, and the filter is chosen when a combination is judged.
-    """
-    first, last = draft.layers[0].nodes, draft.layers[-1].nodes
-    if not bench.needs_filter or draft.filter is not None or not (_alone(first.at) and _alone(last.at)):
-        yield draft
-        return
-    inner = draft.layers[-2].nodes if len(draft.layers) > 1 else first
-    doubtful: list[Indices] = []
-    for stretch in stretches(bench, first):
-        if _settled(bench, draft.frame, stretch.filter):
-            nodes = (_with_filter(bench, one, stretch.filter) for one in (first.pick(stretch.nodes), inner, last))
-            cell = layered(bench, draft.frame, stretch.filter, Thread(*nodes))
-            if cell is not None:
-                yield cell
-        else:
-            doubtful.append(stretch.nodes)
-    if doubtful:
-        cell = layered(bench, draft.frame, None, Thread(first.pick(np.unique(np.concatenate(doubtful))), inner, last))
-        if cell is not None:
-            yield cell
+Numbers = NDArray[np.float64]
+ROOM = 1e-9  # cells overlap by this much, so that rounding leaves no gap between them
+LEAST_SHARE = 1.0 / 30.0  # of the largest gain of a last range; the cell below it reaches down to any gain
+MOST_SHARE = 1e3  # where headroom is not held; the cell above it reaches up to any gain
 
 
-def over(bench: Bench, cell: Draft, common: int) -> Layers:
-    """Return the chains of a cell over one common resistor."""
-    kept = [layer.pick(np.flatnonzero(layer.nodes.common == common)) for layer in cell.layers]
-    first_use = cell.first_use[cell.layers[0].nodes.common == common]
-    return Layers(bench, cell.frame.burden, first_use, tuple(kept))
+@dataclass(frozen=True)
+class Cells:
+    """How finely currents and gains are cut: inner ranges by their upper border, last ranges by their gain."""
 
+    conditions: Conditions
+    inner: int
+    last: int
+    holds_headroom: bool
 
-def _with_filter(bench: Bench, nodes: Nodes, place: int) -> Nodes:
-    if bench.bank.figures is None:
-        return nodes
-    return replace(nodes, at=nodes.at.with_filter(picked(bench.bank.figures, place)))
+    @cached_property
+    def borders_a(self) -> Numbers:
+        """Return the edges of the cells of an inner range's upper border, A."""
+        least, most = self.conditions.current_min_a, self.conditions.current_max_a
+        return least * (most / least) ** np.linspace(0.0, 1.0, self.inner + 1)
 
+    @cached_property
+    def allowed_a(self) -> Numbers:
+        """Return the most that is allowed anywhere in each of these cells, A."""
+        edges = self.borders_a
+        most = np.maximum(allowed_at(self.conditions, edges[:-1]), allowed_at(self.conditions, edges[1:]))
+        for at_a, below, above in breaks(self.conditions):
+            inside = (edges[:-1] <= at_a) & (at_a <= edges[1:])
+            for band in (below, above):
+                most = np.where(inside, np.maximum(most, allowed_a(band, at_a)), most)
+        return np.asarray(most)
 
-def _alone(at: Operating) -> bool:
-    """Return whether the network leaves the output filter's corner alone."""
-    return not np.any(np.asarray(at.output_ohm))
-
-
-def _settled(bench: Bench, frame: Frame, place: int) -> bool:
-    """Return whether neither stock nor cost nor a last range with a larger swing can change the filter taken."""
-    conditions = bench.conditions
-    resistor, capacitor = bench.bank.pairs[place]
-    law = frame.pairing.amplifier.law
-    most_uses = law.copies * (frame.range_count + 1)
-    if conditions.stock_only and in_stock(resistor) < conditions.boards * (1 + most_uses):
-        return False
-    if bench.lifted and isfinite(conditions.settle_s):
-        return False
-    if not isfinite(conditions.cost_limit):
-        return True
-    dearest = max((cost_or_inf(part) for part in bench.shelf.resistors), default=0.0)
-    switch = frame.switch
-    switches = 0.0 if switch is None else ceil(frame.range_count / switch.channels) * cost_or_inf(switch)
-    fixed = sum(cost_or_inf(part) for part in (frame.shunt, frame.amplifier, resistor, capacitor))
-    return most_uses * dearest + switches + fixed <= conditions.cost_limit
+    @cached_property
+    def shares(self) -> Interval:
+        """Return the cells of a last range's gain, as shares of the gain that leaves the least headroom."""
+        edges = LEAST_SHARE ** np.linspace(1.0, 0.0, self.last)
+        if not self.holds_headroom:
+            edges = np.concatenate([edges, MOST_SHARE ** np.linspace(0.1, 1.0, 10)])
+        low, high = np.concatenate([[0.0], edges[:-1]]), edges.copy()
+        if not self.holds_headroom:
+            low, high = np.append(low, edges[-1]), np.append(high, np.inf)
+        return Interval(low[None, :] * (1.0 - ROOM), high[None, :] * (1.0 + ROOM))

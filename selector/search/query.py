@@ -46,11 +46,10 @@ def search(
     started = perf_counter()
     score = score_of(spec)
     bench = bench_of(shelf_of(spec, stock), score)
-    pairs = [(shunt, amplifier) for shunt in bench.shelf.shunts for amplifier in bench.shelf.amplifiers]
     standing = Standing(top, variants)
-    Engine(bench, standing, progress).run(pairs)
+    Engine(bench, standing, progress).run()
     candidates = tuple(present(placed.chain, score) for placed in standing.best())
-    empty = None if candidates else nothing_fits(bench, score, pairs, progress)
+    empty = None if candidates else nothing_fits(bench, score, progress)
     searched = _searched(bench, perf_counter() - started)
     return Found(_ranked(candidates), searched, empty)
 
@@ -79,8 +78,8 @@ def _searched(bench: Bench, seconds: float) -> Searched:
         switches=len(shelf.switches),
         bypasses=len(shelf.bypasses),
         resistors=len(shelf.resistors),
-        filter_pairs=len(bench.bank.pairs),
-        combinations=combinations(shelf, len(bench.bank.pairs)),
+        filter_pairs=len(bench.bank),
+        combinations=combinations(shelf, len(bench.bank)),
         left_out=shelf.left_out,
         evaluated=bench.counts[EVALUATED],
         seconds=seconds,

@@ -62,6 +62,10 @@ class Standing:
         rivals = [one for one in (held, last) if one is not None]
         return min(rivals, key=lambda placed: placed.rank) if rivals else None
 
+    def holds(self, pair: PairKey) -> bool:
+        """Return whether a combination of the pair is in."""
+        return pair in self._placed
+
     def most(self, pair: PairKey) -> float:
         """Return the figure above which no further combination of the pair can enter the list."""
         rival = self.to_beat(pair)

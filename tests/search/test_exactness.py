@@ -10,6 +10,7 @@ from hypothesis import strategies as st
 
 from selector.search import search
 from selector.search.standing import rank_of
+from tests.search.listed import best_of_pairs, ranks_of
 from tests.search.random_catalogue import catalogue
 from tests.search.walk import blocked, nearest, walked
 
@@ -17,8 +18,6 @@ if TYPE_CHECKING:
     from collections.abc import Mapping
 
     from selector.parts import Part
-    from selector.search import Found
-    from selector.search.standing import Rank
     from selector.spec import Spec
 
 SEEDS = st.integers(min_value=0, max_value=2**32)
@@ -26,21 +25,14 @@ SHORT = settings(max_examples=60, deadline=None, suppress_health_check=list(Heal
 LONG = settings(max_examples=500, deadline=None, suppress_health_check=list(HealthCheck), derandomize=True)
 
 
-def _ranks(found: Found) -> list[Rank]:
-    return [rank_of(candidate.score, candidate.design) for candidate in found.candidates]
-
-
 def _agrees(spec: Spec, stock: Mapping[str, tuple[Part, ...]]) -> None:
     """Compare the list of pairs, its head, the variants, and why nothing fits."""
     everything = [rank for rank, _ in walked(spec, stock, variants=True)]
-    pairs: dict[object, Rank] = {}
-    for rank in everything:
-        pairs.setdefault(rank[2][:2], rank)
-    best = sorted(pairs.values())
+    best = best_of_pairs(everything)
     found = search(spec, stock, top=None)
-    assert _ranks(found) == best
-    assert _ranks(search(spec, stock, top=2)) == best[:2]
-    assert _ranks(search(spec, stock, top=7, variants=True)) == everything[:7]
+    assert ranks_of(found) == best
+    assert ranks_of(search(spec, stock, top=2)) == best[:2]
+    assert ranks_of(search(spec, stock, top=7, variants=True)) == everything[:7]
     if best:
         assert found.nothing_fits is None
         return

@@ -1,0 +1,46 @@
+"""A piece of work: a part of the combinations of one pair, with a bound on their figures."""
+
+from __future__ import annotations
+
+from dataclasses import dataclass
+from enum import Enum
+
+from selector.search.lots import NONE
+from selector.search.solve import Lane
+from selector.search.standing import PairKey
+
+EVERYTHING = Lane()
+
+
+class Stage(Enum):
+    """What is done next with a piece."""
+
+    PAIR = "a pair with a number of ranges, any switch"
+    FRAMES = "a pair with a number of ranges, to be taken apart by switch"
+    BLOCKS = "a frame, to be taken apart by common resistor"
+    ROW = "a frame with one common resistor"
+    SPLIT = "a row, to be taken apart by filter"
+    LANE = "a row with one filter"
+    CHAINS = "a row that is solved, its chains to be judged"
+
+
+@dataclass(frozen=True, slots=True)
+class Piece:
+    """Places of the parts that are settled; `commons` holds those of common resistors, by group."""
+
+    stage: Stage
+    pair: PairKey
+    bound: float
+    family: int
+    range_count: int
+    shunt: int
+    amplifier: int
+    switch: int = NONE
+    commons: tuple[tuple[int, ...], ...] = ()
+    common: int = NONE
+    lane: Lane = EVERYTHING
+
+    @property
+    def doubtful(self) -> bool:
+        """Return whether the filter is chosen only when a design is judged."""
+        return self.lane.doubtful

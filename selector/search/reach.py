@@ -1,0 +1,92 @@
+"""Chains of ranges: the least use with which each range can be reached from below."""
+
+from __future__ import annotations
+
+from collections.abc import Callable
+from dataclasses import dataclass
+
+import numpy as np
+from numpy.typing import NDArray
+
+from selector.search.bench import Bench
+from selector.search.rows import Ranges, use_between
+from selector.search.stacks import Indices
+
+Numbers = NDArray[np.float64]
+
+
+@dataclass(frozen=True, slots=True)
+class Below:
+    """Ranges that may lie below others, by rising upper border, with the least use that reaches each."""
+
+    high_a: Numbers
+    gain: Numbers
+    reached: Numbers
+
+    @classmethod
+    def of(cls, ranges: Ranges, reached: Numbers) -> Below:
+        """Return the ranges with what reaches them."""
+        return cls(ranges.high_a(), ranges.gain(), reached)
+
+
+def before(bench: Bench, ranges: Ranges) -> Indices:
+    """Return for each range how many of its own row have a lower upper border; all of them where no order is held."""
+    rows, count = ranges.shape
+    if not bench.ordered:
+        return np.full((rows, count), count)
+    high_a = ranges.high_a()
+    starts = np.zeros((rows, count), dtype=np.int64)
+    starts[:, 1:] = np.where(high_a[:, 1:] > high_a[:, :-1], np.arange(1, count)[None, :], 0)
+    return np.maximum.accumulate(starts, axis=1)
+
+
+def reached_above(bench: Bench, below: Below, here: Ranges, end: Indices) -> Numbers:
+    """Return the least use with which each range is reached, over the first `end` ranges of its row below it."""
+    rows = np.arange(len(end))[:, None]
+
+    def use_from(place: Indices) -> Numbers:
+        border = here.at.above(below.high_a[rows, place], below.gain[rows, place])
+        return use_between(bench, border, here.error, end.shape)
+
+    return np.where(here.stands, least_larger(below.reached, end, use_from), np.inf)
+
+
+def least_larger(reached: Numbers, end: Indices, use_from: Callable[[Indices], Numbers]) -> Numbers:
+    """Return for each element the least of max(reached[place], use from that place) over the first `end` places.
+
+    `reached` has the shape (rows, places), `end` and the uses (rows, columns). The least that reaches a place or a
+    later one rises with the place; the use falls, since a range that begins higher is judged on a part of the same
+    span. The least of their maximum is found by halving.
+    """
+    rows = np.arange(len(end))[:, None]
+    table, last = _doubled(reached), reached.shape[1] - 1
+    low, high = np.zeros_like(end), end.copy()
+    best = np.full(end.shape, np.inf)
+    open_ = low < high
+    while open_.any():
+        middle = np.minimum((low + high) // 2, last)
+        reach = _least(table, rows, middle, np.maximum(end, middle + 1))
+        use = use_from(middle)
+        best = np.where(open_, np.minimum(best, np.maximum(reach, use)), best)
+        rises = reach >= use
+        high = np.where(open_ & rises, middle, high)
+        low = np.where(open_ & ~rises, middle + 1, low)
+        open_ = low < high
+    return best
+
+
+def _doubled(values: Numbers) -> Numbers:
+    """Return the least of 1, 2, 4 … neighbours from each place on, of shape (levels, rows, columns)."""
+    table = [values]
+    width = 1
+    while 2 * width <= values.shape[1]:
+        one = np.full(values.shape, np.inf)
+        one[:, : values.shape[1] - width] = np.minimum(table[-1][:, :-width], table[-1][:, width:])
+        table.append(one)
+        width *= 2
+    return np.stack(table)
+
+
+def _least(table: Numbers, rows: Indices, begin: Indices, end: Indices) -> Numbers:
+    level = np.frexp((end - begin).astype(float))[1] - 1
+    return np.asarray(np.minimum(table[level, rows, begin], table[level, rows, end - (1 << level)]))
