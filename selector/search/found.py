@@ -2,9 +2,8 @@
 
 from __future__ import annotations
 
-from dataclasses import dataclass
-
 from selector.candidate import Candidate, Verdict
+from selector.frozen import dataclass
 
 
 @dataclass(frozen=True, slots=True)

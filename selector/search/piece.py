@@ -16,8 +16,8 @@ class Stage(Enum):
     """What is done next with a piece."""
 
     PAIR = "a pair with a number of ranges, any switch"
-    FRAMES = "a pair with a number of ranges, to be taken apart by switch"
-    BLOCKS = "a frame, to be taken apart by common resistor"
+    BLOCKS = "a pair with a number of ranges, to be taken apart by common resistor"
+    FRAMES = "a pair with a number of ranges and a common resistor, to be taken apart by switch"
     ROW = "a frame with one common resistor"
     SPLIT = "a row, to be taken apart by filter"
     LANE = "a row with one filter"
@@ -26,7 +26,7 @@ class Stage(Enum):
 
 @dataclass(frozen=True, slots=True)
 class Piece:
-    """Places of the parts that are settled; `commons` holds those of common resistors, by group."""
+    """Places of the parts that are settled; `commons` holds those that may be its common resistor."""
 
     stage: Stage
     pair: PairKey
@@ -36,9 +36,13 @@ class Piece:
     shunt: int
     amplifier: int
     switch: int = NONE
-    commons: tuple[tuple[int, ...], ...] = ()
-    common: int = NONE
+    commons: tuple[int, ...] = ()
     lane: Lane = EVERYTHING
+
+    @property
+    def common(self) -> int:
+        """Return the common resistor of a row."""
+        return self.commons[0] if self.commons else NONE
 
     @property
     def doubtful(self) -> bool:

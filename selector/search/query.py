@@ -14,10 +14,9 @@ from selector.parts import Part
 from selector.search.assess import chain_of, complete, spread_is_known, verdict
 from selector.search.bank import bank_of
 from selector.search.bench import Bench, bench_of
-from selector.search.blocked import nothing_fits
 from selector.search.engine import EVALUATED, Engine
-from selector.search.found import Found, Judged, Searched
-from selector.search.objective import score_of
+from selector.search.found import Found, Judged, NothingFits, Searched
+from selector.search.objective import Score, score_of
 from selector.search.order import rounded
 from selector.search.present import present
 from selector.search.shelf import Shelf, in_one_currency, shelf_of
@@ -49,9 +48,16 @@ def search(
     standing = Standing(top, variants)
     Engine(bench, standing, progress).run()
     candidates = tuple(present(placed.chain, score) for placed in standing.best())
-    empty = None if candidates else nothing_fits(bench, score, progress)
+    empty = None if candidates else _nothing_fits(bench, score, progress)
     searched = _searched(bench, perf_counter() - started)
     return Found(_ranked(candidates), searched, empty)
+
+
+def _nothing_fits(bench: Bench, score: Score, progress: Callable[[int, int], None] | None) -> NothingFits:
+    """Return why nothing fits."""
+    from selector.search.blocked import nothing_fits  # noqa: PLC0415 - where something fits, nothing asks
+
+    return nothing_fits(bench, score, progress)
 
 
 def _ranked(candidates: tuple[Candidate, ...]) -> tuple[Candidate, ...]:

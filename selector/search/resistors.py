@@ -3,13 +3,13 @@
 from __future__ import annotations
 
 from collections.abc import Sequence
-from dataclasses import dataclass
 from functools import cached_property
 
 import numpy as np
 from numpy.typing import NDArray
 
 from selector.candidate.figures import ResistorFigures, resistor_figures
+from selector.frozen import dataclass
 from selector.parts import Resistor
 from selector.search.interval import Interval
 from selector.search.stacks import Indices, stacked
@@ -66,6 +66,8 @@ class Resistors:
 
     def of(self, places: Sequence[Indices]) -> ResistorFigures:
         """Return what each of several groups of resistors has between them, as intervals of shape (groups, 1)."""
+        if all(len(group) == len(self) for group in places):
+            return self.whole
         ends = []
         for figure in (self.figures.ohm, self.figures.tolerance_frac, self.figures.tempco_per_k):
             each = [np.asarray(figure)[group] for group in places]

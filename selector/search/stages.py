@@ -11,7 +11,7 @@ from numpy.typing import NDArray
 
 from selector.candidate import Design, cost_of
 from selector.candidate.elementwise import stated
-from selector.candidate.figures import NO_RESISTOR, ResistorFigures
+from selector.candidate.figures import NO_RESISTOR
 from selector.candidate.uses import idle_power_w
 from selector.parts import Amplifier, Shunt
 from selector.search.bench import Bench
@@ -33,7 +33,7 @@ COARSE = (10, 8)
 FINE = (40, 24)
 SINGLE = (1, 64)  # with one range, whose gain alone decides
 ROUNDING = 1e-9  # of sums of costs
-PARTS = (32, 4, 1)  # most common resistors in a block, level by level
+PARTS = (32, 8, 1)  # most common resistors in a block, level by level
 
 
 class Stages:
@@ -63,11 +63,14 @@ class Stages:
                 shunts, amplifiers = np.nonzero(self._screen.pairs(family, count))
                 if not len(shunts):
                     continue
+                commons = () if family.law.common_name is None else tuple(range(len(bench.resistors)))
                 idle = self._idle(Lot(stock, family, count, shunts, amplifiers, None, self._switches))
                 for shunt, amplifier, bound in zip(shunts, amplifiers, idle, strict=True):
                     pair = (bench.shelf.shunts[shunt].part, family.amplifiers[amplifier].part)
                     if wanted is None or pair in wanted:
-                        yield Piece(Stage.PAIR, pair, float(bound), number, count, int(shunt), int(amplifier))
+                        yield Piece(
+                            Stage.PAIR, pair, float(bound), number, count, int(shunt), int(amplifier), NONE, commons
+                        )
 
     def _idle(self, lot: Lot) -> Numbers:
         """Return the figure of each pair with nothing but its power at rest and its burden."""
@@ -89,14 +92,20 @@ class Stages:
         }
         yield from work[batch[0].stage](batch, most)
 
-    def _lot(self, batch: list[Piece], *, any_switch: bool = False) -> Lot:
+    def _lot(self, batch: list[Piece]) -> Lot:
         first = batch[0]
         shunt, amplifier, switch = (
             np.array([getattr(piece, name) for piece in batch]) for name in ("shunt", "amplifier", "switch")
         )
         family = self._family(first.family)
         return Lot(
-            self._stock(), family, first.range_count, shunt, amplifier, None if any_switch else switch, self._switches
+            self._stock(),
+            family,
+            first.range_count,
+            shunt,
+            amplifier,
+            None if first.stage in (Stage.PAIR, Stage.BLOCKS) else switch,
+            self._switches,
         )
 
     def _stock(self) -> Stock:
@@ -108,54 +117,55 @@ class Stages:
     def _family(self, place: int) -> Family:
         return self._stock().families[place]
 
-    def _bounds(
-        self, batch: list[Piece], common: ResistorFigures, cells: Cells, *, any_switch: bool = False
-    ) -> Numbers:
+    def _bounds(self, batch: list[Piece], cells: Cells) -> Numbers:
+        """Return better bounds of pieces that are alike in what of them is settled."""
         if not self._bench.ordered:
             return np.array([piece.bound for piece in batch])
-        lot = self._lot(batch, any_switch=any_switch)
+        lot = self._lot(batch)
+        common = NO_RESISTOR
+        if lot.family.law.common_name is not None:
+            common = self._bench.resistors.of([np.array(piece.commons) for piece in batch])
         if lot.range_count == 1 and cells is self._fine:
             cells = self._single
         least = bounds(self._bench, lot, common, cells)
         return np.asarray(np.maximum(least, np.array([piece.bound for piece in batch])))
 
-    def _every_common(self, batch: list[Piece]) -> ResistorFigures:
-        lot = self._lot(batch)
-        return NO_RESISTOR if lot.family.law.common_name is None else self._bench.resistors.whole
-
     def _pairs(self, batch: list[Piece], most: Most) -> Iterator[Piece]:
-        """Yield the pairs with the bound of any switch."""
-        del most
-        least = self._bounds(batch, self._every_common(batch), self._coarse, any_switch=True)
-        for piece, bound in zip(batch, least, strict=True):
-            yield replace(piece, stage=Stage.FRAMES, bound=float(bound))
-
-    def _frames(self, batch: list[Piece], most: Most) -> Iterator[Piece]:
-        """Yield the pairs with each switch."""
-        switches = [int(one) for one in self._switches] if batch[0].range_count > 1 else [NONE]
-        frames = [replace(piece, switch=switch) for piece in batch for switch in switches]
-        common = self._every_common(frames)
-        least = self._bounds(frames, common, self._fine)
-        for piece, bound in zip(frames, least, strict=True):
-            if bound <= most(piece.pair) and self._affordable(piece):
-                if common is NO_RESISTOR:
-                    yield replace(piece, stage=Stage.ROW, bound=float(bound))
-                else:
-                    every = tuple(tuple(int(one) for one in group) for group in self._bench.resistors.alike)
-                    yield replace(piece, stage=Stage.BLOCKS, bound=float(bound), commons=every)
+        """Yield the pairs with a bound of any switch and any common resistor."""
+        for piece in self._better(batch, self._coarse, most):
+            yield replace(piece, stage=Stage.BLOCKS if len(piece.commons) > 1 else Stage.FRAMES)
 
     def _blocks(self, batch: list[Piece], most: Most) -> Iterator[Piece]:
-        """Yield the frames with some of their common resistors, each block with its bound."""
-        pieces = [(piece, part) for piece in batch for group in piece.commons for part in _parted(group)]
-        blocks = [piece for piece, _ in pieces]
-        common = self._bench.resistors.of([np.array(part) for _, part in pieces])
-        least = self._bounds(blocks, common, self._fine)
-        for (piece, part), bound in zip(pieces, least, strict=True):
-            if bound <= most(piece.pair):
-                if len(part) > 1:
-                    yield replace(piece, bound=float(bound), commons=(part,))
-                else:
-                    yield replace(piece, stage=Stage.ROW, bound=float(bound), common=part[0], commons=())
+        """Yield the pairs with some of their common resistors, each block with the bound of any switch."""
+        blocks = [replace(piece, commons=part) for piece in batch for part in self._parted(piece.commons)]
+        for piece in self._better(blocks, self._fine, most):
+            yield replace(piece, stage=Stage.FRAMES) if len(piece.commons) == 1 else piece
+
+    def _frames(self, batch: list[Piece], most: Most) -> Iterator[Piece]:
+        """Yield the pairs, each with a common resistor where its law has one, with each switch."""
+        switches = [int(one) for one in self._switches] if batch[0].range_count > 1 else [NONE]
+        frames = [replace(piece, stage=Stage.ROW, switch=switch) for piece in batch for switch in switches]
+        for piece in self._better(frames, self._fine, most):
+            if self._affordable(piece):
+                yield piece
+
+    def _better(self, batch: list[Piece], cells: Cells, most: Most) -> list[Piece]:
+        """Return the pieces that are still of use with better bounds."""
+        if not batch:
+            return []
+        each = zip(batch, self._bounds(batch, cells), strict=True)
+        return [replace(piece, bound=float(bound)) for piece, bound in each if bound <= most(piece.pair)]
+
+    def _parted(self, commons: tuple[int, ...]) -> Iterator[tuple[int, ...]]:
+        """Yield common resistors in blocks of the next smaller size; first of all by what they add to an error."""
+        whole_stock = len(commons) == len(self._bench.resistors)
+        groups = (
+            [tuple(int(one) for one in group) for group in self._bench.resistors.alike] if whole_stock else [commons]
+        )
+        size = next(size for size in PARTS if size < len(commons))
+        for group in groups:
+            for begin in range(0, len(group), size):
+                yield group[begin : begin + size]
 
     def _affordable(self, piece: Piece) -> bool:
         bench = self._bench
@@ -222,10 +232,3 @@ class Stages:
             None if piece.common == NONE else parts[piece.common],
             None if not switched or switched[0] == NONE else tuple(parts[one] for one in switched),
         )
-
-
-def _parted(commons: tuple[int, ...]) -> Iterator[tuple[int, ...]]:
-    """Yield common resistors in blocks of the next smaller size."""
-    size = next(size for size in PARTS if size < max(2, len(commons)))
-    for begin in range(0, len(commons), size):
-        yield commons[begin : begin + size]
