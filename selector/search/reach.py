@@ -40,6 +40,17 @@ def before(bench: Bench, ranges: Ranges) -> Indices:
     return np.maximum.accumulate(starts, axis=1)
 
 
+def below_last(bench: Bench, inner: Ranges, last: Ranges) -> Indices:
+    """Return for each last range how many inner ones of its row may lie below it.
+
+    All of them have a larger gain where the last keeps its headroom; else those that do, which end before it.
+    """
+    if bench.holds_headroom or not bench.ordered:
+        return np.full(last.shape, inner.shape[1])
+    larger = inner.gain()[:, :, None] > last.gain()[:, None, :]
+    return np.asarray(larger.sum(axis=1))
+
+
 def reached_above(bench: Bench, below: Below, here: Ranges, end: Indices) -> Numbers:
     """Return the least use with which each range is reached, over the first `end` ranges of its row below it."""
     rows = np.arange(len(end))[:, None]

@@ -12,7 +12,7 @@ from selector.frozen import dataclass
 from selector.search.bench import Bench
 from selector.search.ladder import Ladder
 from selector.search.lots import NONE
-from selector.search.reach import Below, before, reached_above
+from selector.search.reach import Below, before, below_last, reached_above
 from selector.search.rows import Line, Ranges, Spent, first_use, ranges_of, with_filter
 from selector.search.screen import usable_of
 from selector.search.stacks import Indices
@@ -75,8 +75,7 @@ def solve(bench: Bench, line: Line, lanes: list[Lane]) -> Solved:
         end = before(bench, inner)
         for _ in range(line.lot.range_count - 2):
             reached.append(reached_above(bench, Below.of(inner, reached[-1]), inner, end))
-        every = np.full(last.shape, inner.shape[1])
-        use = reached_above(bench, Below.of(inner, reached[-1]), last, every)
+        use = reached_above(bench, Below.of(inner, reached[-1]), last, below_last(bench, inner, last))
         spent = Spent.of(bench, last)
         figure = spent.figures(bench, use)
     return Solved(inner, last, tuple(reached), use, spent, figure, figure.min(axis=1), steps)
