@@ -11,7 +11,9 @@ from selector.app.specs import Asked
 from selector.bill import offer_of
 from selector.candidate import conditions_of
 from selector.errors import Fault, UsageRefused
-from selector.report.answers import BillShown, Checked, Shortlist
+from selector.report.answers.bill import BillShown
+from selector.report.answers.check import Checked
+from selector.report.answers.query import Shortlist
 
 
 def bill(

@@ -4,11 +4,12 @@ from __future__ import annotations
 
 from pathlib import Path
 
-from selector.app.naming import cut, did_you_mean, kind_named, shown_path
+from selector.app.kinds import kind_named
+from selector.app.naming import cut, did_you_mean, shown_path
 from selector.catalogue import Catalogue, default_path, open_catalogue
 from selector.errors import Fault, InputRefused, UsageRefused
 from selector.parts import KINDS, Part
-from selector.report.answers import CatalogueShown, KindCounted
+from selector.report.answers.catalogue import CatalogueShown, KindCounted
 
 Stock = dict[str, tuple[Part, ...]]
 

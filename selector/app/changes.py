@@ -2,10 +2,14 @@
 
 from __future__ import annotations
 
-from selector.catalogue import Change
+from typing import TYPE_CHECKING
+
 from selector.parts import columns
-from selector.report.answers import FieldChange
+from selector.report.answers.changed import FieldChange
 from selector.units import exact
+
+if TYPE_CHECKING:
+    from selector.catalogue.merge import Change
 
 Figure = str | int | float | bool | tuple[str, ...] | None
 

@@ -10,7 +10,7 @@ from selector.app.specs import Asked, read_spec
 from selector.bill import offer_of
 from selector.candidate import conditions_of
 from selector.catalogue import open_catalogue
-from selector.report.answers import Checked
+from selector.report.answers.check import Checked
 from selector.search import judge
 
 InLine = frozenset[tuple[str, str]]

@@ -12,7 +12,7 @@ from selector.app.query import Progress, shortlist
 from selector.app.specs import Asked, read_spec
 from selector.catalogue import in_memory, open_catalogue
 from selector.errors import Fault, Unusable, UsageRefused
-from selector.report.answers import Shortlist
+from selector.report.answers.query import Shortlist
 
 SPEC = "frost_alarm.toml"
 CATALOGUE = "catalogue.db"

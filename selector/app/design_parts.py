@@ -6,7 +6,7 @@ from collections.abc import Mapping, Sequence
 from dataclasses import dataclass, field, replace
 
 from selector.app.cataloguing import unknown_part
-from selector.app.naming import a_part_of
+from selector.app.kinds import a_part_of
 from selector.app.toml_file import TomlFile
 from selector.catalogue import Catalogue
 from selector.errors import Fault, InputRefused

@@ -8,12 +8,13 @@ from decimal import Decimal
 from pathlib import Path
 
 from selector.app.changes import figure_text
-from selector.app.naming import kind_named
+from selector.app.kinds import kind_named
 from selector.app.parts import refuse_unknown_fields
-from selector.catalogue import Conflict, Merge, open_catalogue
+from selector.catalogue import open_catalogue
+from selector.catalogue.merge import Conflict, Merge
 from selector.errors import Fault, InputRefused, UsageRefused
 from selector.parts import Part, columns, read_part
-from selector.report.answers import PartsChanged
+from selector.report.answers.changed import PartsChanged
 from selector.series import values_between
 from selector.units import FRACTION, Quantity, QuantityError, parse
 from selector.units import shown as shown_figure

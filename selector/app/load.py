@@ -8,13 +8,15 @@ from dataclasses import dataclass, field, replace
 from pathlib import Path
 
 from selector.app.cataloguing import path_of
+from selector.app.kinds import kind_named
 from selector.app.load_answer import conflict_faults, file_loaded
-from selector.app.naming import kind_named, shown_path, who
+from selector.app.naming import shown_path, who
 from selector.app.output import Target, same_file, target
-from selector.catalogue import Catalogue, Merge, open_catalogue
+from selector.catalogue import Catalogue, open_catalogue
+from selector.catalogue.bulk import Taken
 from selector.errors import Fault, InputRefused, Unusable, UsageRefused
 from selector.ingest import StockFile, read_stock, refusing_shared, rejects_text
-from selector.report.answers import Loaded
+from selector.report.answers.loaded import Loaded
 
 Confirm = Callable[[Loaded], bool]
 _OF_A_PIPE = "stock.rejects.csv"
@@ -52,14 +54,14 @@ def load(files: Sequence[Path], order: Order) -> Loaded:
     _refuse_unmapped(read)
     read = refusing_shared(read)
     catalogue = open_catalogue(order.catalogue, write=True)
-    parts = [part for file in read for part in file.parts]
+    records = [file.records for file in read]
     if order.dry_run or (order.replace and order.confirm is not None):
-        planned = catalogue.merge(parts, replace=order.replace, dry_run=True)
+        planned = catalogue.take_in(records, replace=order.replace, dry_run=True)
         if order.dry_run or _declined(read, planned, order):
             return _answer(_without(read, planned), planned, dry_run=True, rejects=None)
-    merge = catalogue.merge(parts, replace=order.replace)
-    read = _without(read, merge)
-    return _answer(read, merge, dry_run=False, rejects=_write_rejects(read, wanted, order))
+    taken = catalogue.take_in(records, replace=order.replace)
+    read = _without(read, taken)
+    return _answer(read, taken, dry_run=False, rejects=_write_rejects(read, wanted, order))
 
 
 def stock_of_files(files: Sequence[Path], catalogue: Catalogue) -> None:
@@ -70,7 +72,7 @@ def stock_of_files(files: Sequence[Path], catalogue: Catalogue) -> None:
         raise InputRefused(
             Fault(f"line {row.line}", fault.why, fault.remedy) for row in refused for fault in row.faults
         )
-    catalogue.merge(part for file in read for part in file.parts)
+    catalogue.take_in([file.records for file in read])
 
 
 def _read(files: Sequence[Path], kind: str | None, headings: Mapping[str, str]) -> tuple[StockFile, ...]:
@@ -113,20 +115,18 @@ def _rejects_target(files: Sequence[Path], order: Order) -> Target | None:
     return found
 
 
-def _declined(read: Sequence[StockFile], planned: Merge, order: Order) -> bool:
+def _declined(read: Sequence[StockFile], planned: Sequence[Taken], order: Order) -> bool:
     """Return whether parts would be changed and the user does not want it."""
-    if not planned.changed or order.confirm is None:
+    if not any(each.changed for each in planned) or order.confirm is None:
         return False
     return not order.confirm(_answer(read, planned, dry_run=True, rejects=None))
 
 
-def _without(files: Sequence[StockFile], merge: Merge) -> tuple[StockFile, ...]:
+def _without(files: Sequence[StockFile], taken: Sequence[Taken]) -> tuple[StockFile, ...]:
     """Return the files without the parts that the catalogue has with other figures: these are refused rows now."""
-    if not merge.conflicts:
-        return tuple(files)
     return tuple(
-        file.refusing({(each.kind, each.part): conflict_faults(file, each) for each in merge.conflicts})
-        for file in files
+        file.refusing({(each.kind, each.part): conflict_faults(file, each) for each in of_file.conflicts})
+        for file, of_file in zip(files, taken, strict=True)
     )
 
 
@@ -157,6 +157,6 @@ def _beside(path: Path) -> Path:
     return path.with_name(f"{path.stem}.rejects.csv")
 
 
-def _answer(files: Sequence[StockFile], merge: Merge, *, dry_run: bool, rejects: str | None) -> Loaded:
+def _answer(files: Sequence[StockFile], taken: Sequence[Taken], *, dry_run: bool, rejects: str | None) -> Loaded:
     """Return what became of each file."""
-    return Loaded(tuple(file_loaded(file, merge) for file in files), dry_run, rejects)
+    return Loaded(tuple(map(file_loaded, files, taken)), dry_run, rejects)

@@ -6,14 +6,14 @@ from itertools import islice
 
 from selector.app.changes import field_change, figure_text
 from selector.app.naming import shown_path
-from selector.catalogue import Change, Conflict, Merge
+from selector.catalogue.bulk import Taken
+from selector.catalogue.merge import Change, Conflict
 from selector.ingest import CellFault, StockFile
-from selector.report.answers import CELLS_SHOWN, CellRefused, ColumnRead, FileLoaded
+from selector.report.answers.loaded import CELLS_SHOWN, CellRefused, ColumnRead, FileLoaded
 
 
-def file_loaded(file: StockFile, merge: Merge) -> FileLoaded:
-    """Return the answer for one file out of what became of all parts of the load."""
-    keys = {(part.kind, part.part) for part in file.parts}
+def file_loaded(file: StockFile, taken: Taken) -> FileLoaded:
+    """Return the answer for one file and what became of its parts."""
     return FileLoaded(
         file=shown_path(file.path),
         encoding=file.read.encoding,
@@ -23,11 +23,11 @@ def file_loaded(file: StockFile, merge: Merge) -> FileLoaded:
             ColumnRead(each.heading, each.field, each.unit, each.matched, each.nearest or None, each.samples)
             for each in file.columns
         ),
-        new=sum(key in keys for key in merge.new),
-        changed=sum(key in keys for key in merge.changed),
-        same=sum(key in keys for key in merge.same),
+        new=taken.new,
+        changed=taken.changed,
+        same=taken.same,
         refused=len(file.refused),
-        changes=tuple(field_change(each) for each in merge.changes if (each.kind, each.part) in keys),
+        changes=tuple(map(field_change, taken.changes)),
         cells=_cells(file),
         notes=_notes(file),
     )

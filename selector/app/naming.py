@@ -8,9 +8,6 @@ from collections.abc import Collection, Iterable
 from difflib import SequenceMatcher, get_close_matches
 from pathlib import Path
 
-from selector.errors import Fault, UsageRefused
-from selector.parts import KINDS
-
 _LONGEST = 60
 _NEAR = 3
 _LIKENESS = 0.5
@@ -53,24 +50,6 @@ def did_you_mean(name: str, known: Collection[str], otherwise: str = "") -> str:
     near = near_ones(name, known)
     quoted = " or ".join(f'"{each}"' for each in near)
     return f"did you mean {quoted}?" if near else otherwise
-
-
-def kind_named(name: str, among: Iterable[str] = ()) -> str:
-    """Return the name of a kind as it is written here; UsageRefused where there is none of that name.
-
-    `among` narrows the kinds to choose from.
-    """
-    kinds = tuple(among) or tuple(KINDS)
-    clean = name.strip().casefold()
-    if clean in kinds:
-        return clean
-    what = f'"{cut(name)}" is no kind of part' if clean not in KINDS else f"{a_part_of(clean)} cannot be meant here"
-    raise UsageRefused(Fault("", what, did_you_mean(clean, kinds, f"kinds: {', '.join(kinds)}")))
-
-
-def a_part_of(kind: str) -> str:
-    """Return a kind with its article: `a shunt`, `an amplifier`."""
-    return f"an {kind}" if kind[0] in "aeiou" else f"a {kind}"
 
 
 def who() -> str:

@@ -7,12 +7,14 @@ from pathlib import Path
 
 from selector.app.cataloguing import named_part
 from selector.app.changes import field_change
-from selector.app.naming import a_part_of, cut, did_you_mean, kind_named, who
+from selector.app.kinds import a_part_of, kind_named
+from selector.app.naming import cut, did_you_mean, who
 from selector.catalogue import open_catalogue
 from selector.errors import Fault, InputRefused, UsageRefused
-from selector.ingest import stock_csv, template
 from selector.parts import KINDS, columns, read_part
-from selector.report.answers import FoundPart, PartsChanged, PartsFound, PartsListed
+from selector.report.answers.changed import PartsChanged
+from selector.report.answers.found import FoundPart, PartsFound
+from selector.report.answers.parts import PartsListed
 
 BY_HAND = "by hand"
 _WHY = ("code", "start of the code", "value", "likeness")
@@ -86,11 +88,15 @@ def removed(code: str, kind: str | None = None, catalogue: Path | None = None) -
 
 def csv_text(answer: PartsListed) -> str:
     """Return parts as a stock file that loads again unchanged."""
+    from selector.ingest import stock_csv  # noqa: PLC0415 - a list in another format reads no stock file
+
     return stock_csv(answer.parts)
 
 
 def template_text(kind: str) -> str:
     """Return a stock file of one kind with every heading and some examples."""
+    from selector.ingest import template  # noqa: PLC0415 - a list reads no stock file
+
     return template(kind_named(kind))
 
 

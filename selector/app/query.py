@@ -10,7 +10,7 @@ from selector.app.specs import Asked, read_spec
 from selector.bill import offer_of
 from selector.candidate import conditions_of
 from selector.catalogue import Catalogue, open_catalogue
-from selector.report.answers import Shortlist
+from selector.report.answers.query import Shortlist
 from selector.search import search
 from selector.spec import Spec
 

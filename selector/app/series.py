@@ -6,7 +6,7 @@ from typing import get_args
 
 from selector.app.naming import cut
 from selector.errors import Fault, UsageRefused
-from selector.report.answers import SeriesShown
+from selector.report.answers.series import SeriesShown
 from selector.series import How, nearest, pairs
 from selector.units import CAPACITANCE, INDUCTANCE, RESISTANCE, Quantity, QuantityError, parse
 

@@ -11,7 +11,7 @@ from pathlib import Path
 from selector.app.naming import cut, did_you_mean, file_name, named
 from selector.errors import Fault, InputRefused, UsageRefused
 from selector.parts import KINDS
-from selector.report.answers import SpecShown
+from selector.report.answers.spec import SpecShown
 from selector.spec import KEYS, Spec, load_spec, schema, spec_of, template
 from selector.spec.load import override_value
 from selector.spec.values import read_value

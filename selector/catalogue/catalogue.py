@@ -5,22 +5,24 @@ from __future__ import annotations
 import sqlite3
 import unicodedata
 import weakref
-from collections.abc import Iterable, Mapping
+from collections.abc import Iterable, Mapping, Sequence
 from pathlib import Path
 from types import TracebackType
-from typing import Self
+from typing import TYPE_CHECKING, Self
 
 from selector.catalogue.connection import settle
-from selector.catalogue.find import Found, find_parts
-from selector.catalogue.info import Info, info_of
-from selector.catalogue.merge import Change, Merge, Put, differing, plan
 from selector.catalogue.place import default_path, missing, user_path
 from selector.catalogue.rows import Stored, part_of, stored
 from selector.catalogue.snapshot import Snapshot
-from selector.catalogue.store import FileStore, MemoryStore, Store, must_exist
-from selector.catalogue.write import Gone, write
+from selector.catalogue.store import FileStore, MemoryStore, Store, Writing, must_exist
 from selector.errors import Fault, InputRefused, UsageRefused
 from selector.parts import KINDS, Part, cells_of, read_part
+
+if TYPE_CHECKING:
+    from selector.catalogue.bulk import Source, Taken
+    from selector.catalogue.find import Found
+    from selector.catalogue.info import Info
+    from selector.catalogue.merge import Change, Merge
 
 
 class Catalogue:
@@ -68,19 +70,26 @@ class Catalogue:
 
     def find(self, text: str, kind: str | None = None, limit: int = 20) -> tuple[Found, ...]:
         """Return the parts that answer a text, the likeliest first (see find.find_parts for the order)."""
+        from selector.catalogue.find import find_parts  # noqa: PLC0415 - other readers do without
+
         kinds = KINDS if kind is None else (kind,)
         return find_parts((part for each in kinds for part in self.parts(each)), text, limit)
 
     def info(self) -> Info:
         """Return path, schema version, counts, size and the last change."""
+        from selector.catalogue.info import info_of  # noqa: PLC0415 - other readers do without
+
         self._rows()
         return info_of(self._snapshot_now(), self.path)
 
     def add(self, part: Part) -> None:
         """Add a part; InputRefused where the catalogue has one of that kind and code."""
+        from selector.catalogue.merge import Put  # noqa: PLC0415 - readers do without
+        from selector.catalogue.write import write  # noqa: PLC0415 - readers do without
+
         self._refuse_reader()
         with self._store.writing(1) as writing:
-            if part.part in writing.before.rows[part.kind]:
+            if writing.row(part.kind, part.part) is not None:
                 raise _there_already(part.kind, part.part)
             write(writing, [Put(part.kind, part.part, stored(part))])
         self._forget()
@@ -93,15 +102,18 @@ class Catalogue:
         InputRefused
             There is no such part, its new figures are impossible, or its new code is taken.
         """
+        from selector.catalogue.merge import Put, differing  # noqa: PLC0415 - readers do without
+        from selector.catalogue.write import Gone, write  # noqa: PLC0415 - readers do without
+
         self._refuse_reader()
         must_exist(self._store)
         with self._store.writing(1) as writing:
-            row = _row_of(writing.before, kind, code)
+            row = _row_of(writing, kind, code)
             before = part_of(kind, row, self._store.shown)
             after = read_part(kind, {**cells_of(before), **fields}, where=f"{kind} {before.part}", bare=False)
             differences = differing(before, after)
             if after.part != before.part:
-                if after.part in writing.before.rows[kind]:
+                if writing.row(kind, after.part) is not None:
                     raise _there_already(kind, after.part)
                 write(writing, [Put(kind, after.part, stored(after))], [Gone(kind, before.part, row)])
             elif differences or after.source != before.source:
@@ -111,10 +123,12 @@ class Catalogue:
 
     def remove(self, kind: str, code: str) -> Part:
         """Remove a part and return what it was; InputRefused where there is none."""
+        from selector.catalogue.write import Gone, write  # noqa: PLC0415 - readers do without
+
         self._refuse_reader()
         must_exist(self._store)
         with self._store.writing(1) as writing:
-            row = _row_of(writing.before, kind, code)
+            row = _row_of(writing, kind, code)
             part = part_of(kind, row, self._store.shown)
             write(writing, gone=[Gone(kind, part.part, row)])
         self._forget()
@@ -125,17 +139,36 @@ class Catalogue:
 
         With `dry_run` nothing is written and no file is made; what would be done is returned all the same.
         """
+        from selector.catalogue.merge import plan  # noqa: PLC0415 - readers do without
+        from selector.catalogue.write import write  # noqa: PLC0415 - readers do without
+
         self._refuse_reader()
         given = tuple(parts)
         if dry_run or not given:
-            merge, _ = plan(self._store.snapshot(), given, replace=replace, where=self._store.shown)
+            merge, _ = plan(self._store.snapshot().row, given, replace=replace, where=self._store.shown)
             return merge
         with self._store.writing(len(given)) as writing:
-            merge, puts = plan(writing.before, given, replace=replace, where=self._store.shown)
+            merge, puts = plan(writing.row, given, replace=replace, where=self._store.shown)
             if puts:
                 write(writing, puts)
         self._forget()
         return merge
+
+    def take_in(self, sources: Sequence[Source], *, replace: bool = False, dry_run: bool = False) -> tuple[Taken, ...]:
+        """Take in the parts of stock files in one transaction, as `merge` does; return what became of each file's.
+
+        The sources may hold any number of parts: they are read from as they are written.
+        """
+        from selector.catalogue.bulk import planned, take_in  # noqa: PLC0415 - readers do without
+
+        self._refuse_reader()
+        count = sum(map(len, sources))
+        if dry_run or not count:
+            return planned(sources, self._store.snapshot(), replace=replace, where=self._store.shown)
+        with self._store.writing(count) as writing:
+            taken = take_in(sources, writing, replace=replace, where=self._store.shown)
+        self._forget()
+        return taken
 
     def _rows(self) -> Mapping[str, Mapping[str, Stored]]:
         """Return all rows by kind and code."""
@@ -197,9 +230,9 @@ def _clean(code: str) -> str:
     return unicodedata.normalize("NFC", code.strip())
 
 
-def _row_of(snapshot: Snapshot, kind: str, code: str) -> Stored:
+def _row_of(writing: Writing, kind: str, code: str) -> Stored:
     """Return the row of a part that must be there."""
-    row = snapshot.rows[kind].get(_clean(code))
+    row = writing.row(kind, _clean(code))
     if row is None:
         raise InputRefused(
             Fault(f"{kind} {code}", "is not in the catalogue", "search for it: selector parts find TEXT")

@@ -16,6 +16,7 @@ WAIT_S = 30.0
 """How long a lock of another process is waited for, in s."""
 
 _MOST_ROWS_HELD = 100_000
+_CACHE_KIB = 64_000
 _HOT_JOURNAL = ("SQLITE_READONLY", "SQLITE_CANTOPEN")
 
 
@@ -36,12 +37,15 @@ def connected(path: Path, mode: Mode) -> Iterator[sqlite3.Connection]:
 def make_durable(connection: sqlite3.Connection, rows: int) -> None:
     """Set what a writer has besides: a journal that is deleted, and every step on the disk before the next.
 
-    Up to 100 000 rows stay in memory until the commit: what spills earlier locks readers out.
+    Up to 100 000 rows stay in memory until the commit: what spills earlier locks readers out. More rows spill, from a
+    cache that is large enough for the tree of their codes.
     """
     connection.execute("PRAGMA journal_mode = DELETE")
     connection.execute("PRAGMA synchronous = EXTRA")
     if rows <= _MOST_ROWS_HELD:
         connection.execute("PRAGMA cache_spill = 0")
+    else:
+        connection.execute(f"PRAGMA cache_size = {-_CACHE_KIB}")
 
 
 def settle(connection: sqlite3.Connection) -> None:

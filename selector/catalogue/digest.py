@@ -3,8 +3,11 @@
 from __future__ import annotations
 
 import json
-from collections.abc import Iterable
+import math
+from collections.abc import Callable, Iterable, Sequence
 from hashlib import blake2b
+from itertools import repeat
+from json.encoder import encode_basestring_ascii
 
 Value = str | int | float | bytes | None
 Row = tuple[Value, ...]
@@ -25,6 +28,61 @@ def row_digest(kind: str, values: Row) -> bytes:
         A value is none that a catalogue holds (not finite, or bytes): the row is damaged.
     """
     return blake2b(_encode((kind, *values)).encode("ascii"), digest_size=DIGEST_BYTES).digest()
+
+
+def row_digests(kind: str, columns: Sequence[Sequence[Value]]) -> list[bytes]:
+    """Return the digest of each of many rows of one kind: those of `row_digest`, in less time.
+
+    `columns` holds the values of all rows column by column. What is the same in all rows is written once.
+
+    Raises
+    ------
+    ValueError, TypeError
+        As `row_digest` does.
+    """
+    pieces = [_quoted(_encode(kind))]
+    varying: list[Iterable[str]] = []
+    for column in columns:
+        if _alike(column):
+            pieces.append(_quoted(_encode(column[0])))
+        else:
+            pieces.append("%s")
+            varying.append(_texts(column))
+    template = f"[{','.join(pieces)}]"
+    rows = zip(*varying, strict=True) if varying else repeat((), len(columns[0]))
+    texts = "\n".join(map(template.__mod__, rows)).encode("ascii").split(b"\n")
+    return [blake2b(text, digest_size=DIGEST_BYTES).digest() for text in texts]
+
+
+def _alike(column: Sequence[Value]) -> bool:
+    """Return whether all values of a column are written alike; noughts are not, where one may have a minus."""
+    first = column[0]
+    if column[-1] != first or column.count(first) < len(column):
+        return False
+    return isinstance(first, str | None) or (first != 0.0 and len(set(map(type, column))) == 1)
+
+
+def _texts(column: Sequence[Value]) -> Iterable[str]:
+    """Return the values of a column as JSON."""
+    types = set(map(type, column))
+    write = _WRITERS.get(types.pop()) if len(types) == 1 else None
+    if write is None or (write is float.__repr__ and not all(map(_IS_FINITE, column))):
+        return map(_encode, column)
+    return map(write, column)
+
+
+_IS_FINITE: Callable[..., bool] = math.isfinite
+_WRITERS: dict[type, Callable[..., str]] = {
+    str: encode_basestring_ascii,
+    int: int.__repr__,
+    float: float.__repr__,
+    type(None): lambda _value: "null",
+}
+
+
+def _quoted(text: str) -> str:
+    """Return a text as it stands in a template."""
+    return text.replace("%", "%%")
 
 
 def digest_sum(digests: Iterable[bytes]) -> bytes:

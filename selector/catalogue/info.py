@@ -6,9 +6,9 @@ from collections.abc import Mapping
 from dataclasses import dataclass
 from pathlib import Path
 
-from selector.catalogue.rows import Stored, place_of
+from selector.catalogue.rows import Stored
 from selector.catalogue.snapshot import Snapshot
-from selector.parts import KINDS
+from selector.parts import KINDS, place_of
 
 
 @dataclass(frozen=True, slots=True)

@@ -2,16 +2,18 @@
 
 from __future__ import annotations
 
-from collections.abc import Iterable
+from collections.abc import Callable, Iterable
 from dataclasses import dataclass
 
 from selector.catalogue.rows import Stored, part_of, stored
-from selector.catalogue.snapshot import Snapshot
 from selector.errors import Fault, InputRefused
 from selector.parts import Part, columns
 
 Key = tuple[str, str]
 """Kind and code of a part."""
+
+Lookup = Callable[[str, str], Stored | None]
+"""From kind and code to the row that the catalogue has of them."""
 
 Figure = str | int | float | bool | tuple[str, ...] | None
 
@@ -57,7 +59,7 @@ class Put:
     replaced: bytes | None = None
 
 
-def plan(before: Snapshot, parts: Iterable[Part], *, replace: bool, where: str) -> tuple[Merge, tuple[Put, ...]]:
+def plan(before: Lookup, parts: Iterable[Part], *, replace: bool, where: str) -> tuple[Merge, tuple[Put, ...]]:
     """Return what becomes of the parts, and the rows to write for it.
 
     Two parts are the same where all fields but `source` are: a second load of a file changes nothing.
@@ -81,7 +83,7 @@ def plan(before: Snapshot, parts: Iterable[Part], *, replace: bool, where: str) 
         if key in seen:
             raise InputRefused(Fault(f"{part.kind} {part.part}", "is given twice", "give it once"))
         seen.add(key)
-        row, old = stored(part), before.rows[part.kind].get(part.part)
+        row, old = stored(part), before(*key)
         if old is None:
             new.append(key)
             puts[key] = Put(*key, row)

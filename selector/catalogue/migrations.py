@@ -33,18 +33,21 @@ def newest() -> int:
     return 1 + len(STEPS)
 
 
-def create(db: Database, ddl: dict[str, str]) -> None:
-    """Make the tables of today's version in an empty database, inside the transaction that is open."""
+def create(connection: sqlite3.Connection, ddl: dict[str, str]) -> None:
+    """Make the tables of today's version in an empty database, inside the transaction that is open.
+
+    sqlite3 does it alone: sqlite-utils brings pandas along, which takes longer than a load of thousands of rows.
+    """
     for statement in ddl.values():
-        db.execute(statement)
+        connection.execute(statement)
     state = State()
-    row = {"id": 1, "rows": state.rows, "digests": state.digests, "changes": 0, "changed": ""}
-    db.table("state").insert(row)
-    db.execute(f"PRAGMA application_id = {APPLICATION_ID}")
-    db.execute(f"PRAGMA user_version = {newest()}")
+    sql = 'INSERT INTO "state" ("id", "rows", "digests", "changes", "changed") VALUES (1, ?, ?, 0, ?)'
+    connection.execute(sql, (state.rows, state.digests, state.changed))
+    connection.execute(f"PRAGMA application_id = {APPLICATION_ID}")
+    connection.execute(f"PRAGMA user_version = {newest()}")
 
 
-def migrate(db: Database, version: int, where: str) -> None:
+def migrate(connection: sqlite3.Connection, version: int, where: str) -> None:
     """Bring the tables from an older version to today's, inside the transaction that is open.
 
     The rows are checked against their digests before and after; nothing stays where that or a step fails.
@@ -54,7 +57,9 @@ def migrate(db: Database, version: int, where: str) -> None:
     Unusable
         The old rows are not what was written, or the new tables are not today's.
     """
-    connection = db.conn
+    from sqlite_utils import Database  # noqa: PLC0415 - only a change of tables needs it, and it is slow to import
+
+    db = Database(connection, recursive_triggers=False, execute_plugins=False)
     _refuse_damaged_rows(connection, where)
     for step in STEPS[version - 1 :]:
         step(db)

@@ -2,26 +2,23 @@
 
 from __future__ import annotations
 
-from collections.abc import Callable
-from functools import cache
 from typing import NamedTuple
 
-from selector.catalogue.digest import Row, Value, row_digest
+from selector.catalogue.digest import row_digest
 from selector.catalogue.faults import damaged
-from selector.catalogue.schema import sql_type
-from selector.parts import KINDS, Column, Part, columns
+from selector.parts import Part, Record, part_of_record, record_of
 
 
 class Stored(NamedTuple):
     """One row as it stands in the file: the values in the order of the kind's columns, and the digest beside them."""
 
-    values: Row
+    values: Record
     digest: bytes
 
 
 def stored(part: Part) -> Stored:
     """Return the row of a part."""
-    values = tuple(_value_of(getattr(part, column.name), column) for column in columns(part.kind))
+    values = record_of(part)
     return Stored(values, row_digest(part.kind, values))
 
 
@@ -34,14 +31,7 @@ def part_of(kind: str, row: Stored, where: str) -> Part:
         The row does not have its digest: it is not what was written.
     """
     refuse_damaged(kind, row, where)
-    names, flags, lists = _layout(kind)
-    fields: dict[str, object] = dict(zip(names, row.values, strict=True))
-    for name in flags:
-        fields[name] = bool(fields[name])
-    for name in lists:
-        fields[name] = tuple(str(fields[name]).split())
-    construct: Callable[..., Part] = KINDS[kind].model_construct
-    return construct(**fields)
+    return part_of_record(kind, row.values)
 
 
 def refuse_damaged(kind: str, row: Stored, where: str) -> None:
@@ -52,31 +42,3 @@ def refuse_damaged(kind: str, row: Stored, where: str) -> None:
         raise damaged(where, f"a row of table {kind}") from error
     if not sound:
         raise damaged(where, f"row {row.values[0]!r} of table {kind}")
-
-
-def place_of(kind: str, name: str) -> int:
-    """Return where in a kind's rows a field stands."""
-    return _layout(kind)[0].index(name)
-
-
-def _value_of(value: object, column: Column) -> Value:
-    """Return a field's value as its column keeps it: no minus nought, no empty text where it may be absent."""
-    if isinstance(value, str):
-        return value if value or column.required or column.default is not None else None
-    if value is None:
-        return None
-    if isinstance(value, tuple):
-        return " ".join(value)
-    if isinstance(value, bool | int | float):
-        return float(value) + 0.0 if sql_type(column) == "REAL" else int(value)
-    msg = f"{column.name} is {type(value).__name__}"
-    raise TypeError(msg)
-
-
-@cache
-def _layout(kind: str) -> tuple[tuple[str, ...], tuple[str, ...], tuple[str, ...]]:
-    """Return the names of all columns of a kind, of those that are flags, and of those that are lists of names."""
-    all_of = columns(kind)
-    flags = tuple(column.name for column in all_of if column.sort == "flag")
-    lists = tuple(column.name for column in all_of if column.sort == "names")
-    return tuple(column.name for column in all_of), flags, lists

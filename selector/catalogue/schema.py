@@ -41,9 +41,9 @@ def quoted(name: str) -> str:
 
 def sql_type(column: Column) -> str:
     """Return the strict type of a field's column: TEXT, INTEGER or REAL."""
-    if column.sort == "flag" or column.whole:
-        return "INTEGER"
-    return "REAL" if column.sort == "quantity" else "TEXT"
+    if column.real:
+        return "REAL"
+    return "INTEGER" if column.sort == "flag" or column.whole else "TEXT"
 
 
 def stored_names(kind: str) -> tuple[str, ...]:

@@ -6,7 +6,7 @@ import sqlite3
 from collections.abc import Mapping
 from dataclasses import dataclass, field
 
-from selector.catalogue.digest import digest_sum
+from selector.catalogue.digest import digest_sum, moved_sum
 from selector.catalogue.faults import damaged, not_a_catalogue
 from selector.catalogue.place import APPLICATION_ID, refuse_newer
 from selector.catalogue.rows import Stored
@@ -14,6 +14,8 @@ from selector.catalogue.schema import found_tables, quoted, stored_names, tables
 from selector.parts import KINDS
 
 Rows = dict[str, dict[str, Stored]]
+
+_AT_ONCE = 10_000
 
 
 @dataclass(frozen=True, slots=True)
@@ -33,6 +35,15 @@ class Snapshot:
     version: int
     state: State
     rows: Mapping[str, Mapping[str, Stored]]
+
+    @property
+    def counts(self) -> Mapping[str, int]:
+        """Return how many rows there are of each kind."""
+        return {kind: len(of_kind) for kind, of_kind in self.rows.items()}
+
+    def row(self, kind: str, code: str) -> Stored | None:
+        """Return the row of one part, None where there is none."""
+        return self.rows[kind].get(code)
 
 
 def empty() -> Snapshot:
@@ -70,6 +81,36 @@ def read(connection: sqlite3.Connection, version: int, where: str) -> Snapshot:
     return Snapshot(version, state, rows)
 
 
+def standing(connection: sqlite3.Connection, where: str) -> tuple[State, Mapping[str, int]]:
+    """Return the state row and the number of rows of each kind, inside the transaction that is open.
+
+    The rows are seen through as far as their digests go, and not kept; Unusable as `read`.
+    """
+    refuse_other_schema(connection, where)
+    counts: dict[str, int] = {}
+    total = digest_sum(())
+    try:
+        state = _state(connection, where)
+        for kind in KINDS:
+            found = connection.execute(f'SELECT "digest" FROM {quoted(kind)}')  # noqa: S608 - a name of ours, quoted
+            counts[kind] = 0
+            while some := found.fetchmany(_AT_ONCE):
+                counts[kind] += len(some)
+                total = moved_sum(total, (), (row[0] for row in some))
+    except (UnicodeDecodeError, TypeError, ValueError, OverflowError) as error:
+        raise damaged(where, "a value cannot be read") from error
+    _refuse_other(state, sum(counts.values()), total, where)
+    return state, counts
+
+
+def row_of(connection: sqlite3.Connection, kind: str, code: str) -> Stored | None:
+    """Return the row of one part, None where there is none, inside the transaction that is open."""
+    names = ", ".join(quoted(name) for name in stored_names(kind))
+    sql = f'SELECT {names} FROM {quoted(kind)} WHERE "part" = ?'  # noqa: S608 - names of ours, quoted
+    row = connection.execute(sql, (code,)).fetchone()
+    return None if row is None else Stored(row[:-1], row[-1])
+
+
 def refuse_other_schema(connection: sqlite3.Connection, where: str) -> None:
     """Raise Unusable where the tables are not, to the letter, those that this program makes."""
     try:
@@ -101,7 +142,12 @@ def _rows(connection: sqlite3.Connection, kind: str) -> dict[str, Stored]:
 def _refuse_other_sum(rows: Rows, state: State, where: str) -> None:
     """Raise Unusable where rows are missing, doubled or beside the state row."""
     count = sum(len(of_kind) for of_kind in rows.values())
+    _refuse_other(state, count, digest_sum(row.digest for of_kind in rows.values() for row in of_kind.values()), where)
+
+
+def _refuse_other(state: State, count: int, digests: bytes, where: str) -> None:
+    """Raise Unusable where the number of rows, or the sum of their digests, is not what the state row says."""
     if count != state.rows:
         raise damaged(where, f"{count} parts where {state.rows} were written")
-    if digest_sum(row.digest for of_kind in rows.values() for row in of_kind.values()) != state.digests:
+    if digests != state.digests:
         raise damaged(where, "the parts are not those that were written")

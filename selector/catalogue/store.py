@@ -3,30 +3,33 @@
 from __future__ import annotations
 
 import sqlite3
-from collections.abc import Iterator
+from collections.abc import Iterator, Mapping
 from contextlib import AbstractContextManager, contextmanager
 from dataclasses import dataclass
 from pathlib import Path
-from typing import TYPE_CHECKING, Protocol
+from typing import Protocol
 
 from selector.catalogue import migrations
 from selector.catalogue.backup import copy_before_migration
 from selector.catalogue.connection import connected, in_memory, make_durable, transaction, wants_rollback
 from selector.catalogue.faults import cannot_be_opened, told_plainly
 from selector.catalogue.place import Place, look, missing, shown_path
+from selector.catalogue.rows import Stored
 from selector.catalogue.schema import tables
-from selector.catalogue.snapshot import Snapshot, empty, read, version_of
-
-if TYPE_CHECKING:
-    from sqlite_utils import Database
+from selector.catalogue.snapshot import Snapshot, State, empty, read, row_of, standing, version_of
 
 
 @dataclass(frozen=True, slots=True)
 class Writing:
-    """A write transaction that is open: the database, and all rows as they are inside it."""
+    """A write transaction that is open: its connection, and the state row and the rows of each kind when it began."""
 
-    db: Database
-    before: Snapshot
+    connection: sqlite3.Connection
+    state: State
+    counts: Mapping[str, int]
+
+    def row(self, kind: str, code: str) -> Stored | None:
+        """Return the row of one part as it is now, None where there was none of its kind."""
+        return row_of(self.connection, kind, code) if self.counts[kind] else None
 
 
 class Store(Protocol):
@@ -143,15 +146,12 @@ def must_exist(store: Store) -> None:
 
 
 def _begun(connection: sqlite3.Connection, version: int, where: str) -> Writing:
-    """Return the open transaction with today's tables and all rows."""
-    from sqlite_utils import Database  # noqa: PLC0415 - only writers need it, and it is slow to import
-
-    db = Database(connection, recursive_triggers=False, execute_plugins=False)
+    """Return the open transaction with today's tables."""
     if version == 0:
-        migrations.create(db, tables())
+        migrations.create(connection, tables())
     elif version < migrations.newest():
-        migrations.migrate(db, version, where)
-    return Writing(db, read(connection, migrations.newest(), where))
+        migrations.migrate(connection, version, where)
+    return Writing(connection, *standing(connection, where))
 
 
 def _read_upgraded(connection: sqlite3.Connection, version: int, where: str) -> Snapshot:
@@ -159,4 +159,5 @@ def _read_upgraded(connection: sqlite3.Connection, version: int, where: str) -> 
     with in_memory() as copy:
         connection.backup(copy)
         with transaction(copy, immediate=True):
-            return _begun(copy, version, where).before
+            _begun(copy, version, where)
+            return read(copy, migrations.newest(), where)

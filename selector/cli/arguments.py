@@ -36,5 +36,11 @@ def hoisted(arguments: Sequence[str]) -> list[str]:
 
 
 def command_of(arguments: Sequence[str]) -> str:
-    """Return the command that arguments name, empty where they name none."""
-    return next((each for each in hoisted(arguments) if not each.startswith("-")), "")
+    """Return the command: the first word behind the global options; empty where that is another option."""
+    words = iter(hoisted(arguments))
+    for word in words:
+        if word == CATALOGUE:
+            next(words)
+        elif not word.startswith(f"{CATALOGUE}="):
+            return "" if word.startswith("-") else word
+    return ""

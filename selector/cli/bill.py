@@ -25,7 +25,8 @@ from selector.errors import EXIT_DOES_NOT_MEET, Fault, UsageRefused
 if TYPE_CHECKING:
     from selector.app.check import InLine
     from selector.app.specs import Asked
-    from selector.report.answers import BillShown, Checked
+    from selector.report.answers.bill import BillShown
+    from selector.report.answers.check import Checked
 
 TOML = "toml"
 DesignOption = Annotated[
@@ -73,7 +74,7 @@ def _of_rank(asked: Asked, rank: int, boards: int | None, catalogue: Path | None
     """Print the bill of a place in the list; where it is empty, say why."""
     from selector.app.bill import bill as answer_bill  # noqa: PLC0415 - arrays are slow to import
     from selector.report import render  # noqa: PLC0415 - arrays are slow to import
-    from selector.report.answers import Shortlist  # noqa: PLC0415 - arrays are slow to import
+    from selector.report.answers.query import Shortlist  # noqa: PLC0415 - arrays are slow to import
 
     with Progress() as progress:
         shown = answer_bill(asked, rank=rank, boards=boards, catalogue=catalogue, progress=progress)

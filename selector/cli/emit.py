@@ -12,7 +12,7 @@ from selector.errors import Fault, UsageRefused
 
 if TYPE_CHECKING:
     from selector.app.output import Target
-    from selector.report.answers import Answer
+    from selector.report.answers.answer import Answer
 
 FORMS = ("table", "json", "csv", "markdown")
 _BY_ENDING = {".json": "json", ".csv": "csv", ".md": "markdown", ".toml": "toml"}

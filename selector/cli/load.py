@@ -16,7 +16,7 @@ from selector.cli.streams import can_ask
 from selector.errors import EXIT_INPUT_REFUSED, Fault, UsageRefused
 
 if TYPE_CHECKING:
-    from selector.report.answers import Loaded
+    from selector.report.answers.loaded import Loaded
 
 FilesArgument = Annotated[list[Path], typer.Argument(metavar="FILE...", help="CSV files of stocked parts.")]
 MapOption = Annotated[

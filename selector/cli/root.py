@@ -2,7 +2,9 @@
 
 from __future__ import annotations
 
+from collections.abc import Callable, Mapping
 from pathlib import Path
+from types import MappingProxyType
 from typing import Annotated
 
 import typer
@@ -12,24 +14,44 @@ from selector.cli import bill, catalogue, check, demo, fill, load, parts, query,
 from selector.cli.settings import Settings
 from selector.cli.streams import put
 
-app = typer.Typer(
-    name="selector",
-    help="The exact short list of shunt, amplifier, gain resistors, switch and filter for a current measurement.",
-    rich_markup_mode=None,
-    pretty_exceptions_enable=False,
-    add_completion=False,
-    no_args_is_help=True,
+COMMANDS: Mapping[str, Callable[..., None] | typer.Typer] = MappingProxyType(
+    {
+        "query": query.query,
+        "bill": bill.bill,
+        "check": check.check,
+        "load": load.load,
+        "parts": parts.app,
+        "spec": spec.app,
+        "fill": fill.fill,
+        "series": series.series,
+        "catalogue": catalogue.app,
+        "demo": demo.demo,
+    }
 )
-app.command("query")(query.query)
-app.command("bill")(bill.bill)
-app.command("check")(check.check)
-app.command("load")(load.load)
-app.add_typer(parts.app, name="parts")
-app.add_typer(spec.app, name="spec")
-app.command("fill")(fill.fill)
-app.command("series")(series.series)
-app.add_typer(catalogue.app, name="catalogue")
-app.command("demo")(demo.demo)
+"""The commands in the order of the help: a function each, or a group of commands."""
+
+
+def program(command: str) -> typer.Typer:
+    """Return the program with the one command that is named, with all where none is: help shows them.
+
+    To put together what is not called takes a tenth of the start.
+    """
+    app = typer.Typer(
+        name="selector",
+        help="The exact short list of shunt, amplifier, gain resistors, switch and filter for a current measurement.",
+        rich_markup_mode=None,
+        pretty_exceptions_enable=False,
+        add_completion=False,
+        no_args_is_help=True,
+    )
+    app.callback()(selector)
+    for name in (command,) if command in COMMANDS else COMMANDS:
+        called = COMMANDS[name]
+        if isinstance(called, typer.Typer):
+            app.add_typer(called, name=name)
+        else:
+            app.command(name)(called)
+    return app
 
 
 def _version(wanted: bool) -> None:  # noqa: FBT001 - the option's own value
@@ -38,7 +60,6 @@ def _version(wanted: bool) -> None:  # noqa: FBT001 - the option's own value
         raise typer.Exit
 
 
-@app.callback()
 def selector(
     context: typer.Context,
     catalogue: Annotated[

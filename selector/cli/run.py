@@ -9,7 +9,7 @@ import typer
 
 from selector.cli import faults
 from selector.cli.arguments import command_of, hoisted
-from selector.cli.root import app
+from selector.cli.root import program
 from selector.cli.streams import EXIT_PIPE_CLOSED
 from selector.errors import EXIT_DONE, EXIT_INPUT_REFUSED, EXIT_INTERRUPTED, EXIT_UNUSABLE, EXIT_USAGE, SelectorError
 
@@ -44,9 +44,10 @@ def run(arguments: Sequence[str]) -> int:  # noqa: PLR0911 - one status for each
 
 def _invoked(arguments: Sequence[str]) -> int:
     """Run a command and return its status; wrong usage is said and answered with its own."""
-    command = typer.main.get_command(app)
+    ordered = hoisted(arguments)
+    command = typer.main.get_command(program(command_of(arguments)))
     try:
-        with command.make_context("selector", hoisted(arguments)) as context:
+        with command.make_context("selector", ordered) as context:
             command.invoke(context)
     except typer.Exit as ended:
         return ended.exit_code

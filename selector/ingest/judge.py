@@ -48,11 +48,11 @@ class Judge:
             return (kind,)
         return self._read(kind, cells, row.line)
 
-    def code_of(self, row: RawRow) -> str:
-        """Return kind and code of a row that is refused, in one text, as far as they can be told."""
+    def code_of(self, row: RawRow) -> tuple[str, str]:
+        """Return kind and code of a row that is refused, as far as they can be told."""
         cells = dict(zip((heading.field for heading in self.headings), row.cells, strict=False))
         kind = cells.get(KIND, "").strip().casefold() or self.kind or ""
-        return f"{kind} {unguarded(cells.get('part', '').strip())}"
+        return kind, unguarded(cells.get("part", "").strip())
 
     def _kind(self, cell: str) -> str | CellFault:
         """Return the kind of a row, from its cell or else the one named for the whole file."""

@@ -5,13 +5,12 @@ from __future__ import annotations
 import csv
 from collections.abc import Iterator, Mapping, Sequence
 from dataclasses import dataclass
-from itertools import chain
 
 from selector.errors import Fault, InputRefused, UsageRefused
 from selector.ingest.headings import KIND, Heading, field_names, nearest, read_headings
-from selector.ingest.lines import Line
+from selector.ingest.lines import Lines
 from selector.ingest.result import MissingFields
-from selector.ingest.rows import RawRow, raw_rows
+from selector.ingest.rows import RawRow, Rows
 from selector.parts import KINDS, columns
 
 DELIMITERS = (",", ";", "\t")
@@ -27,7 +26,7 @@ class Layout:
     heading_line: int
     headings: tuple[Heading, ...]
     not_mapped: tuple[str, ...]
-    rows: Iterator[RawRow]
+    rows: Rows
 
     @property
     def fields(self) -> frozenset[str]:
@@ -35,7 +34,7 @@ class Layout:
         return frozenset(heading.field for heading in self.headings if heading.field is not None)
 
 
-def layout_of(lines: Iterator[Line], kind: str | None, named: Mapping[str, str], where: str) -> Layout:
+def layout_of(lines: Lines, kind: str | None, named: Mapping[str, str], where: str) -> Layout:
     """Return the layout that the first line with text in it gives.
 
     Raises
@@ -51,7 +50,7 @@ def layout_of(lines: Iterator[Line], kind: str | None, named: Mapping[str, str],
     if first is None:
         raise InputRefused(Fault(where, "has no line with text in it", "the first line names the columns"))
     delimiter = _delimiter(first.text, kind, named)
-    rows = raw_rows(chain((first,), lines), delimiter)
+    rows = Rows(lines, first, delimiter)
     row = next(rows, RawRow(first.number, (), "has nothing but delimiters", "name the columns in it"))
     headings, not_mapped = read_headings(row.cells, kind, named)
     faults = _faults(row, headings, kind, f"{where} line {row.line}")

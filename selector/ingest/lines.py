@@ -6,16 +6,22 @@ import codecs
 import os
 import re
 import stat
+from collections import deque
 from collections.abc import Iterator
 from contextlib import contextmanager
 from dataclasses import dataclass
+from io import BufferedReader, FileIO
 from pathlib import Path
-from typing import IO, NamedTuple
+from typing import NamedTuple
 
 from selector.errors import Fault, InputRefused
 
 LONGEST_LINE_BYTES = 16_000_000
 
+LONGEST_PLAIN = 9_999
+"""Lines of a block have at most so many characters: neither a cell nor the number of cells can be too large then."""
+
+_BUFFER_BYTES = 1 << 17
 _HEAD_BYTES = 4096
 _MOST_NULS = 2
 _LINE = re.compile(r"[^\r\n]*(?:\r\n|\r|\n)|[^\r\n]+\Z")
@@ -38,11 +44,20 @@ class Line(NamedTuple):
 
 
 @dataclass(frozen=True, slots=True)
+class Block:
+    """Whole lines without their ends: the number of the first, and whether a quote stands in one of them."""
+
+    first: int
+    texts: list[str]
+    quotes: bool
+
+
+@dataclass(frozen=True, slots=True)
 class OpenFile:
     """A stock file while it is read: the encoding found, and its lines."""
 
     encoding: str
-    lines: Iterator[Line]
+    lines: Lines
 
 
 def shown_path(path: Path) -> str:
@@ -62,12 +77,12 @@ def opened(path: Path) -> Iterator[OpenFile]:
     where = shown_path(path)
     try:
         _refuse_other_sorts(path, where)
-        with path.open("rb") as file:
+        with BufferedReader(FileIO(path), _BUFFER_BYTES) as file:
             head = file.peek(_HEAD_BYTES)[:_HEAD_BYTES]
             _refuse_other_content(head, where)
             marked = head.startswith(codecs.BOM_UTF8)
             file.read(len(codecs.BOM_UTF8) if marked else 0)
-            yield OpenFile("utf-8-sig" if marked else "utf-8", _lines(file, where))
+            yield OpenFile("utf-8-sig" if marked else "utf-8", Lines(file, where))
     except OSError as error:
         raise InputRefused(Fault(where, f"cannot be read: {error.strerror or error}")) from error
     except ValueError as error:
@@ -96,17 +111,77 @@ def _refuse_other_content(head: bytes, where: str) -> None:
         raise InputRefused(Fault(where, "is no text file", _SAVE_AS))
 
 
-def _lines(file: IO[bytes], where: str) -> Iterator[Line]:
-    """Yield the decoded lines; they end in LF, CR LF or CR."""
-    number = 0
-    while raw := file.readline(LONGEST_LINE_BYTES + 1):
+class Lines(Iterator[Line]):
+    """The decoded lines of a file, which end in LF, CR LF or CR: one at a time, or as a block of plain ones."""
+
+    def __init__(self, file: BufferedReader[FileIO], where: str) -> None:
+        """Begin at the place where the file stands."""
+        self._file, self._where = file, where
+        self._pieces: deque[str] = deque()
+        self._number = 0
+        self._taken_bytes = 0
+        self._seen_bytes = 0
+
+    def __next__(self) -> Line:
+        """Return the next line.
+
+        Raises
+        ------
+        InputRefused
+            It is too long, or not UTF-8.
+        """
+        if not self._pieces:
+            raw = self._file.readline(LONGEST_LINE_BYTES + 1)
+            if not raw:
+                raise StopIteration
+            self._taken_bytes += len(raw)
+            self._split(raw)
+        self._number += 1
+        return Line(self._number, self._pieces.popleft())
+
+    def block(self) -> Block | None:
+        """Return the whole lines that stand in the buffer, None where they must be looked at one by one.
+
+        That is so where one holds what is no UTF-8, a NUL or a lone CR, or is long; the next line ends it.
+        """
+        if self._pieces or self._taken_bytes < self._seen_bytes:
+            return None
+        head = self._file.peek(1)
+        raw = head[: head.rfind(b"\n") + 1]
+        self._seen_bytes = self._taken_bytes + len(raw)
+        texts = _plain_texts(raw)
+        if not texts:
+            return None
+        self._file.read(len(raw))
+        self._taken_bytes = self._seen_bytes
+        first = self._number + 1
+        self._number += len(texts)
+        return Block(first, texts, b'"' in raw)
+
+    def _split(self, raw: bytes) -> None:
+        """Keep what stands between ends of lines."""
+        here = f"{self._where} line {self._number + 1}"
         if len(raw) > LONGEST_LINE_BYTES:
             what = f"is longer than {LONGEST_LINE_BYTES // 1_000_000} MB"
-            raise InputRefused(Fault(f"{where} line {number + 1}", what, "see whether this is a stock file"))
-        text = _decoded(raw, f"{where} line {number + 1}")
-        for piece in _LINE.findall(text) if "\r" in text else (text,):
-            number += 1
-            yield Line(number, piece)
+            raise InputRefused(Fault(here, what, "see whether this is a stock file"))
+        text = _decoded(raw, here)
+        self._pieces.extend(_LINE.findall(text) if "\r" in text else (text,))
+
+
+def _plain_texts(raw: bytes) -> list[str]:
+    """Return whole lines without their ends, none where one of them is not plain."""
+    if not raw or b"\x00" in raw:
+        return []
+    if b"\r" in raw:
+        raw = raw.replace(b"\r\n", b"\n")
+    if b"\r" in raw:
+        return []
+    try:
+        texts = raw.decode("utf-8").split("\n")
+    except UnicodeDecodeError:
+        return []
+    texts.pop()
+    return texts if max(map(len, texts)) <= LONGEST_PLAIN else []
 
 
 def _decoded(raw: bytes, where: str) -> str:

@@ -103,7 +103,7 @@ class RefusedRows(Sequence[RefusedRow]):
             self._file.seek(self._starts[index - len(self._held)])
             line, cells, faults = json.loads(self._file.readline())
         except OSError as error:
-            raise _no_room(error) from error
+            raise no_room(error) from error
         return RefusedRow(line, tuple(cells), tuple(CellFault(*fault) for fault in faults))
 
     def _spill(self, row: RefusedRow) -> None:
@@ -115,10 +115,10 @@ class RefusedRows(Sequence[RefusedRow]):
             self._starts.append(self._file.seek(0, 2))
             self._file.write(json.dumps((row.line, row.cells, row.faults)).encode("ascii") + b"\n")
         except OSError as error:
-            raise _no_room(error) from error
+            raise no_room(error) from error
 
 
-def _no_room(error: OSError) -> Unusable:
+def no_room(error: OSError, what: str = "the rows that are refused") -> Unusable:
     """Return the fault of a temporary file that cannot be written or read."""
-    what = f"the rows that are refused cannot be kept: {error.strerror or error}"
+    what = f"{what} cannot be kept: {error.strerror or error}"
     return Unusable(Fault("temporary folder", what, "make room, or set TMPDIR to another folder"))

@@ -5,10 +5,11 @@ from __future__ import annotations
 import csv
 import re
 from collections import deque
-from collections.abc import Iterator
+from collections.abc import Iterator, Sequence
 from dataclasses import dataclass
+from typing import NamedTuple
 
-from selector.ingest.lines import LONGEST_LINE_BYTES, Line
+from selector.ingest.lines import LONGEST_LINE_BYTES, Block, Line, Lines
 
 LONGEST_CELL = 10_000
 MOST_COLUMNS = 10_000
@@ -27,6 +28,16 @@ class RawRow:
     remedy: str = ""
 
 
+class PlainRows(NamedTuple):
+    """Rows without faults of their own: the lines on which they begin, and the cells of each."""
+
+    lines: Sequence[int]
+    cells: Sequence[Sequence[str]]
+
+
+_NO_ROWS = PlainRows((), ())
+
+
 class _QuoteStaysOpen(Exception):
     """A quote has swallowed more lines, or more characters, than a cell may have."""
 
@@ -34,10 +45,10 @@ class _QuoteStaysOpen(Exception):
 class _Feed(Iterator[str]):
     """Lines for a csv reader, which can be given back to it."""
 
-    def __init__(self, lines: Iterator[Line]) -> None:
-        """Keep the source; nothing is taken yet."""
+    def __init__(self, lines: Lines, first: Line) -> None:
+        """Keep the source and a line that was taken from it already."""
         self._lines = lines
-        self._back: deque[Line] = deque()
+        self._back: deque[Line] = deque((first,))
         self._size = 0
         self.taken: list[Line] = []
         self.ended = False
@@ -54,6 +65,14 @@ class _Feed(Iterator[str]):
                 return None
             self._back.append(following)
         return self._back[0]
+
+    def block(self) -> Block | None:
+        """Return a block of lines, None where the next ones must be looked at one by one."""
+        return None if self._back else self._lines.block()
+
+    def back(self, block: Block) -> None:
+        """Give a block back as lines."""
+        self._back.extend(Line(number, f"{text}\n") for number, text in enumerate(block.texts, block.first))
 
     def skip(self) -> None:
         """Take the line that `peek` returned."""
@@ -76,23 +95,55 @@ class _Feed(Iterator[str]):
         return line.text
 
 
-def raw_rows(lines: Iterator[Line], delimiter: str) -> Iterator[RawRow]:
-    """Yield the rows of a file, the heading line among them, without blank lines.
+class Rows(Iterator[RawRow]):
+    """The rows of a file, the heading line among them, without blank lines: one at a time, or many plain ones.
 
     A row whose quote stays open is refused alone: reading goes on in the line after its first. The same where a quote
     over several lines ends inside a cell, or gives the row another number of cells than the heading has: it then
     ended at a quote of another row.
     """
-    feed, width = _Feed(lines), 0
-    while (line := feed.peek()) is not None:
-        if _too_wide(line.text, delimiter):
-            feed.skip()
-            yield RawRow(line.number, (line.text.rstrip("\r\n"),), *_TOO_WIDE)
-            continue
-        row = _row(feed, delimiter, width)
-        if any(cell.strip() for cell in row.cells):
-            width = width or len(row.cells)
-            yield row
+
+    def __init__(self, lines: Lines, first: Line, delimiter: str) -> None:
+        """Begin with a line that was taken from the others already."""
+        self._feed, self._delimiter = _Feed(lines, first), delimiter
+        self._width = 0
+
+    def __next__(self) -> RawRow:
+        """Return the next row."""
+        while (line := self._feed.peek()) is not None:
+            if _too_wide(line.text, self._delimiter):
+                self._feed.skip()
+                return RawRow(line.number, (line.text.rstrip("\r\n"),), *_TOO_WIDE)
+            row = _row(self._feed, self._delimiter, self._width)
+            if any(cell.strip() for cell in row.cells):
+                self._width = self._width or len(row.cells)
+                return row
+        raise StopIteration
+
+    def plain(self) -> PlainRows:
+        """Return the next rows, none where they must be taken one by one: each is one plain line."""
+        block = self._feed.block()
+        if block is None:
+            return _NO_ROWS
+        rows = _cells_of(block, self._delimiter)
+        if len(rows) != len(block.texts):
+            self._feed.back(block)
+            return _NO_ROWS
+        lines = range(block.first, block.first + len(rows))
+        if all(cells and cells[0].strip() for cells in rows):
+            return PlainRows(lines, rows)
+        numbered = [(line, cells) for line, cells in zip(lines, rows, strict=True) if any(map(str.strip, cells))]
+        return PlainRows([line for line, _ in numbered], [cells for _, cells in numbered])
+
+
+def _cells_of(block: Block, delimiter: str) -> list[list[str]]:
+    """Return the cells of each line; fewer rows than lines where a quote is not closed in its line."""
+    if not block.quotes:
+        return [text.split(delimiter) for text in block.texts]
+    try:
+        return list(csv.reader(block.texts, delimiter=delimiter, strict=True))
+    except csv.Error:
+        return []
 
 
 _TOO_WIDE = (f"has more than {MOST_COLUMNS} columns", "see whether this is a stock file")

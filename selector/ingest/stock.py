@@ -1,21 +1,24 @@
-"""The reading of a stock file, row by row; what it holds in memory is bounded by what is accepted."""
+"""The reading of a stock file, row by row; what it holds in memory does not grow with the file."""
 
 from __future__ import annotations
 
-from array import array
-from collections.abc import Mapping
-from hashlib import blake2b
+from collections.abc import Mapping, Sequence
+from itertools import islice
 from pathlib import Path
 
+from selector.ingest.accepted import AcceptedRows, Piece, Spool
+from selector.ingest.codes import Codes
 from selector.ingest.headings import Heading
 from selector.ingest.judge import Judge
 from selector.ingest.layout import Layout, layout_of
 from selector.ingest.lines import opened, shown_path
-from selector.ingest.refused import CellFault, RefusedRow, RefusedRows
-from selector.ingest.result import ColumnRead, Key, MissingFields, Read, StockFile, packed, shared_fault
-from selector.ingest.rows import RawRow
-from selector.parts import Part
+from selector.ingest.quick import Quick
+from selector.ingest.refused import RefusedRow, RefusedRows
+from selector.ingest.result import ColumnRead, Read, StockFile
+from selector.ingest.rows import PlainRows, RawRow
+from selector.parts import record_of
 
+_AT_ONCE = 2_000
 _SAMPLES = 3
 _LONGEST_SAMPLE = 40
 
@@ -53,87 +56,92 @@ def read_stock(
         layout = layout_of(file.lines, kind, headings or {}, where)
         read = Read(file.encoding, layout.delimiter, layout.heading_line)
         name = shown_path(Path(path.name))
-        judge = Judge(layout.headings, kind, f"{who}, {name}" if who else name)
-        intake = _Intake(layout, judge)
-        for row in layout.rows:
-            intake.take(row)
+        intake = _Intake(layout, kind, f"{who}, {name}" if who else name)
+        intake.take_all()
     return intake.finished(path, read)
 
 
 class _Intake:
     """The rows of one file, sorted into parts and refused rows while they come."""
 
-    def __init__(self, layout: Layout, judge: Judge) -> None:
+    def __init__(self, layout: Layout, kind: str | None, origin: str) -> None:
         """Begin with no row."""
-        self._layout, self._judge = layout, judge
+        self._layout = layout
+        self._judge = Judge(layout.headings, kind, origin)
+        self._quick = Quick(layout.headings, kind, origin)
         self._samples: list[list[str]] = [[] for _ in layout.headings]
-        self._accepted: dict[Key, tuple[int, Part, str]] = {}
-        self._again: dict[Key, int] = {}
-        self._refused = RefusedRows()
-        self._refused_codes = array("Q")
-        self._code_heading = next((each.text for each in layout.headings if each.field == "part"), "part")
+        self._accepted, self._codes = Spool(), Codes()
+        self._refused, self._refused_codes = RefusedRows(), Codes()
 
-    def take(self, row: RawRow) -> None:
-        """Sort one row in."""
-        self._sample(row)
-        part = self._judge.part_of(row)
-        if isinstance(part, tuple):
-            self._refuse(row, part)
-            return
-        key = (part.kind, part.part)
-        if key not in self._accepted:
-            self._accepted[key] = (row.line, part, packed(row.cells))
-            return
-        first = self._accepted[key][0]
-        self._again.setdefault(key, row.line)
-        self._refused.add(RefusedRow(row.line, row.cells, (self._shared(key, first),)))
+    def take_all(self) -> None:
+        """Sort all rows in: those that are plain many at once, the others as many as come between them."""
+        rows = self._layout.rows
+        waiting: list[RawRow] = []
+        while True:
+            some = rows.plain()
+            row = None if some.lines else next(rows, None)
+            if row is not None and not row.why:
+                waiting.append(row)
+            if some.lines or row is None or row.why or len(waiting) == _AT_ONCE:
+                self._take(PlainRows([each.line for each in waiting], [each.cells for each in waiting]))
+                waiting = []
+            if some.lines:
+                self._take(some)
+            elif row is None:
+                return
+            elif row.why:
+                self._sample((row.cells,))
+                self._take_one(row)
 
     def finished(self, path: Path, read: Read) -> StockFile:
         """Return all that came, without the parts whose code stands in another row as well."""
-        rows = tuple(self._accepted.values())
         file = StockFile(
             path=path,
             read=read,
             columns=tuple(map(_column_read, self._layout.headings, self._samples)),
-            rows=tuple((line, part) for line, part, _ in rows),
+            accepted=AcceptedRows(self._accepted),
+            codes=self._codes,
             refused=self._refused,
-            missing=self._missing(),
+            missing=tuple(each for each in self._judge.missing.values() if each.fields),
             not_mapped=self._layout.not_mapped,
-            packed=tuple(cells for _, _, cells in rows),
         )
-        return file.refusing({key: (self._shared(key, line),) for key, line in self._shared_keys().items()})
+        return file.refusing_several(self._codes.also_in(self._refused_codes))
 
-    def _shared_keys(self) -> dict[Key, int]:
-        """Return the codes of parts that another row has as well, with that row's line, 0 where it was not kept."""
-        codes = set(self._refused_codes) if self._accepted else set()
-        among_refused = {key: 0 for key in self._accepted if _number_of(" ".join(key)) in codes}
-        return among_refused | self._again
+    def _take(self, rows: PlainRows) -> None:
+        """Sort rows in that have no fault of their own."""
+        if not rows.lines:
+            return
+        self._sample(rows.cells)
+        for piece in self._quick.pieces(rows):
+            if piece.kind:
+                self._accept(piece)
+            else:
+                for line, cells in zip(piece.lines, piece.cells, strict=True):
+                    self._take_one(RawRow(line, tuple(cells)))
 
-    def _refuse(self, row: RawRow, faults: tuple[CellFault, ...]) -> None:
-        """Keep a row that is refused, and its code, so that a row that shares it is refused too."""
-        self._refused.add(RefusedRow(row.line, row.cells, faults))
-        self._refused_codes.append(_number_of(self._judge.code_of(row)))
+    def _accept(self, piece: Piece) -> None:
+        """Keep rows that are parts."""
+        self._accepted.add(piece)
+        self._codes.add(piece.kind, piece.records[0])
 
-    def _shared(self, key: Key, line: int) -> CellFault:
-        """Return the fault of a row that shares its code with the one in a line."""
-        return shared_fault(self._code_heading, key, f"line {line}" if line else "a row that is refused")
+    def _take_one(self, row: RawRow) -> None:
+        """Judge one row by itself, and keep it as what it is; the code of a refused one counts against others too."""
+        part = self._judge.part_of(row)
+        if isinstance(part, tuple):
+            self._refused.add(RefusedRow(row.line, row.cells, part))
+            kind, code = self._judge.code_of(row)
+            self._refused_codes.add(kind, (code,))
+        else:
+            self._accept(Piece(part.kind, (row.line,), [(value,) for value in record_of(part)], (row.cells,)))
 
-    def _missing(self) -> tuple[MissingFields, ...]:
-        """Return the kinds for which columns are missing, in the order in which they came."""
-        return tuple(each for each in self._judge.missing.values() if each.fields)
-
-    def _sample(self, row: RawRow) -> None:
+    def _sample(self, rows: Sequence[Sequence[str]]) -> None:
         """Keep what stands in the first rows of each column."""
-        for samples, cell in zip(self._samples, row.cells, strict=False):
-            if len(samples) < _SAMPLES and cell.strip():
-                samples.append(cell.strip()[:_LONGEST_SAMPLE])
+        for place, samples in enumerate(self._samples):
+            if len(samples) < _SAMPLES:
+                texts = (cells[place].strip()[:_LONGEST_SAMPLE] for cells in rows if place < len(cells))
+                samples.extend(islice(filter(None, texts), _SAMPLES - len(samples)))
 
 
 def _column_read(heading: Heading, samples: list[str]) -> ColumnRead:
     """Return how one column was read."""
     return ColumnRead(heading.text, heading.field, heading.unit, heading.matched, heading.nearest, tuple(samples))
-
-
-def _number_of(code: str) -> int:
-    """Return eight bytes that stand for a code: many refused ones must not fill the memory."""
-    return int.from_bytes(blake2b(code.encode("utf-8", "surrogatepass"), digest_size=8).digest(), "big")

@@ -22,10 +22,13 @@ class Part(BaseModel):
     A field that is absent is None, never zero, unless it has a default.
     """
 
-    model_config = ConfigDict(frozen=True, extra="forbid", strict=True)
+    # built when a part is first judged: lists and searches take parts that were judged when they came in
+    model_config = ConfigDict(frozen=True, extra="forbid", strict=True, defer_build=True)
 
     kind: ClassVar[str]
     rules: ClassVar[tuple[Rule, ...]] = ()
+    fills: ClassVar[tuple[str, ...]] = ()
+    """The fields that `completed` may fill in."""
 
     part: Code
     description: Text = ""
@@ -44,6 +47,11 @@ class Part(BaseModel):
         """Return what cannot stand beside each other among the values read; a field that could not be is not there."""
         rules = (known_fields(cls.model_fields), *cls.rules)
         return [wrong for rule in rules for wrong in rule(values)]
+
+    @classmethod
+    def completed(cls, values: Mapping[str, Value]) -> Mapping[str, Value]:
+        """Return values with those that follow from others filled in."""
+        return values
 
     def derived(self) -> frozenset[str]:
         """Return the fields whose values follow from other fields, so that they need not be stated."""

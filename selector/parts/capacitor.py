@@ -9,7 +9,7 @@ from pydantic import model_validator
 
 from selector.parts.base import Part, Text
 from selector.parts.dielectric import dielectric_change_frac
-from selector.parts.holds import fraction, value
+from selector.parts.holds import Value, fraction, value
 from selector.units import CAPACITANCE, VOLTAGE
 
 
@@ -20,6 +20,7 @@ class Capacitor(Part):
     """
 
     kind: ClassVar[str] = "capacitor"
+    fills: ClassVar[tuple[str, ...]] = ("temp_change",)
 
     capacitance: Annotated[float, value(CAPACITANCE)]
     tolerance: Annotated[float, fraction()]
@@ -33,12 +34,17 @@ class Capacitor(Part):
         by_code = self.temp_change is not None and self.temp_change == dielectric_change_frac(self.dielectric)
         return frozenset({"temp_change"}) if by_code else frozenset()
 
+    @classmethod
+    def completed(cls, values: Mapping[str, Value]) -> Mapping[str, Value]:
+        """Return values with `temp_change` filled in from the dielectric code."""
+        if values.get("temp_change") is not None:
+            return values
+        dielectric = values.get("dielectric")
+        change = dielectric_change_frac(dielectric) if isinstance(dielectric, str) else None
+        return values if change is None else {**values, "temp_change": change}
+
     @model_validator(mode="before")
     @classmethod
     def _change_by_code(cls, given: object) -> object:
-        """Fill `temp_change` from the dielectric code."""
-        if not isinstance(given, Mapping) or given.get("temp_change") is not None:
-            return given
-        dielectric = given.get("dielectric")
-        change = dielectric_change_frac(dielectric) if isinstance(dielectric, str) else None
-        return given if change is None else {**given, "temp_change": change}
+        """Fill in what follows from the dielectric code, whoever builds the part."""
+        return cls.completed(given) if isinstance(given, Mapping) else given

@@ -41,6 +41,11 @@ class Column:
         return self.holds.quantity is COUNT
 
     @property
+    def real(self) -> bool:
+        """Return whether the value is kept as a float: a figure that need not be whole."""
+        return self.sort == "quantity" and not self.whole
+
+    @property
     def least(self) -> float | None:
         """Return the least value allowed."""
         return self.holds.least

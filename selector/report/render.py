@@ -6,10 +6,9 @@ from collections.abc import Callable
 from importlib import import_module
 
 from selector.errors import Fault, UsageRefused
-from selector.report.answers import Answer
+from selector.report.answers.answer import Answer
 from selector.report.formats import FORMATS
 from selector.report.told import Told
-from selector.report.views import VIEWS
 
 
 def render(answer: Answer, form: str) -> str:
@@ -30,5 +29,5 @@ def told(answer: Answer) -> Told:
 
     The view is imported here: what shows candidates brings the whole search along, which preferred values do without.
     """
-    view: Callable[[Answer], Told] = import_module(f"selector.report.views.{VIEWS[type(answer)]}").told
+    view: Callable[[Answer], Told] = import_module(f"selector.report.views.{answer.view}").told
     return view(answer)

@@ -4,8 +4,10 @@ from __future__ import annotations
 
 from collections.abc import Callable, Mapping
 from dataclasses import dataclass
+from typing import TYPE_CHECKING
 
-from selector.report.document import Document
+if TYPE_CHECKING:  # JSON needs no document
+    from selector.report.document import Document
 
 Json = None | bool | int | float | str | list["Json"] | dict[str, "Json"]
 Cell = None | bool | int | float | str

@@ -3,6 +3,7 @@
 from __future__ import annotations
 
 from collections.abc import Sequence
+from dataclasses import dataclass
 
 import numpy as np
 from numpy.typing import NDArray
@@ -10,7 +11,6 @@ from numpy.typing import NDArray
 from selector.candidate import Conditions, Design, Operating, cost_of
 from selector.candidate.design import cost_or_inf, in_stock
 from selector.candidate.figures import FilterFigures, filter_figures
-from selector.frozen import dataclass
 from selector.limits import LIMITS, FilterCheck
 from selector.limits.measure import ChoiceAt, ChoiceCheck
 from selector.parts import Capacitor, Resistor

@@ -3,14 +3,13 @@
 from __future__ import annotations
 
 from collections import Counter
-from dataclasses import field
+from dataclasses import dataclass, field
 from functools import cached_property
 
 import numpy as np
 from numpy.typing import NDArray
 
 from selector.candidate import Conditions
-from selector.frozen import dataclass
 from selector.limits import LIMITS, FilterCheck, Limit, PointCheck
 from selector.limits.each.headroom import LIMIT as HEADROOM
 from selector.limits.each.range_order import LIMIT as RANGE_ORDER

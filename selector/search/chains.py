@@ -4,13 +4,13 @@ from __future__ import annotations
 
 import heapq
 from collections.abc import Iterator
+from dataclasses import dataclass
 from math import inf
 
 import numpy as np
 from numpy.typing import NDArray
 
 from selector.candidate.elementwise import stated
-from selector.frozen import dataclass
 from selector.search.bench import Bench
 from selector.search.lots import NONE
 from selector.search.order import cost_key

@@ -3,13 +3,12 @@
 from __future__ import annotations
 
 from collections.abc import Iterator
-from dataclasses import replace
+from dataclasses import dataclass, replace
 from math import ceil, inf, isfinite
 
 import numpy as np
 
 from selector.candidate.design import cost_or_inf, in_stock
-from selector.frozen import dataclass
 from selector.search.bench import Bench
 from selector.search.ladder import Ladder
 from selector.search.lots import NONE

@@ -2,8 +2,9 @@
 
 from __future__ import annotations
 
+from dataclasses import dataclass
+
 from selector.candidate import Candidate, Verdict
-from selector.frozen import dataclass
 
 
 @dataclass(frozen=True, slots=True)

@@ -2,7 +2,7 @@
 
 from __future__ import annotations
 
-from dataclasses import replace
+from dataclasses import dataclass, replace
 from math import inf
 
 import numpy as np
@@ -11,7 +11,6 @@ from numpy.typing import NDArray
 from selector.candidate import Operating, Pairing
 from selector.candidate.figures import NO_RESISTOR, FilterFigures
 from selector.candidate.operating import FilterAt
-from selector.frozen import dataclass
 from selector.limits import LIMITS, FilterCheck
 from selector.physics.filters import corner_hz
 from selector.search.bank import FilterBank

@@ -2,6 +2,8 @@
 
 from __future__ import annotations
 
+from dataclasses import dataclass
+
 import numpy as np
 
 from selector.candidate import Conditions, Pairing, Window, window_of
@@ -14,7 +16,6 @@ from selector.candidate.figures import (
     shunt_figures,
     switch_figures,
 )
-from selector.frozen import dataclass
 from selector.gain import Law, Stage
 from selector.parts import Amplifier
 from selector.search.interval import Interval

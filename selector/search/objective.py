@@ -2,10 +2,10 @@
 
 from __future__ import annotations
 
+from dataclasses import dataclass
 from typing import Protocol
 
 from selector.candidate.elementwise import larger
-from selector.frozen import dataclass
 from selector.real import Real
 from selector.spec import Spec
 

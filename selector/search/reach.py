@@ -3,11 +3,11 @@
 from __future__ import annotations
 
 from collections.abc import Callable
+from dataclasses import dataclass
 
 import numpy as np
 from numpy.typing import NDArray
 
-from selector.frozen import dataclass
 from selector.search.bench import Bench
 from selector.search.rows import Ranges, use_between
 from selector.search.stacks import Indices

@@ -3,13 +3,13 @@
 from __future__ import annotations
 
 from collections.abc import Sequence
+from dataclasses import dataclass
 from functools import cached_property
 
 import numpy as np
 from numpy.typing import NDArray
 
 from selector.candidate.figures import ResistorFigures, resistor_figures
-from selector.frozen import dataclass
 from selector.parts import Resistor
 from selector.search.interval import Interval
 from selector.search.stacks import Indices, stacked
@@ -86,11 +86,11 @@ class Resistors:
         """Return the places by what they add to an error, the best first; by resistance within a class."""
         drift = np.asarray(self.figures.tempco_per_k) * self.temperature_change_k
         spread = np.asarray(self.figures.tolerance_frac) + drift
-        values = np.unique(np.array([float(f"{one:.3g}") for one in spread]))
+        values = np.array(sorted({float(f"{one:.3g}") for one in spread}))
         if len(values) > CLASSES:
             values = np.quantile(spread, np.linspace(0.0, 1.0, CLASSES + 1)[1:])
         of_class = np.searchsorted(values, spread * (1.0 - 1e-3), side="left")
-        return [np.flatnonzero(of_class == one) for one in np.unique(of_class)]
+        return [np.flatnonzero(of_class == one) for one in sorted(set(of_class.tolist()))]
 
 
 def resistors_of(parts: Sequence[Resistor], temperature_change_k: float) -> Resistors:
@@ -115,9 +115,9 @@ def least_between(table: list[Numbers], begin: Indices, end: Indices) -> Numbers
     size = end - begin
     level = np.frexp(size.astype(float))[1] - 1
     least = np.empty(np.broadcast(begin, end).shape)
-    for one in np.unique(level):
+    for one in set(level.ravel().tolist()):
         here = level == one
         first = np.broadcast_to(begin, least.shape)[here]
-        last = np.broadcast_to(end, least.shape)[here] - (1 << int(one))
+        last = np.broadcast_to(end, least.shape)[here] - (1 << one)
         least[here] = np.minimum(table[one][first], table[one][last])
     return least

@@ -2,7 +2,7 @@
 
 from __future__ import annotations
 
-from dataclasses import replace
+from dataclasses import dataclass, replace
 
 import numpy as np
 from numpy.typing import NDArray
@@ -12,7 +12,6 @@ from selector.candidate import Operating, Pairing
 from selector.candidate.figures import NO_RESISTOR
 from selector.candidate.operating import FilterAt
 from selector.candidate.uses import power_w, use_headroom
-from selector.frozen import dataclass
 from selector.limits import FilterCheck, LinkCheck, RangeCheck, use_of, worst_point
 from selector.search.bench import Bench
 from selector.search.lots import NONE, Lot

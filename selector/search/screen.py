@@ -2,13 +2,14 @@
 
 from __future__ import annotations
 
+from dataclasses import dataclass
+
 import numpy as np
 from numpy.typing import NDArray
 
 from selector.candidate import Design, Pairing, ShuntAt
 from selector.candidate.figures import NO_SWITCH
 from selector.candidate.operating import AmplifierAt, SwitchAt
-from selector.frozen import dataclass
 from selector.limits import AmplifierCheck, DesignCheck, Limit, Measure, PairCheck, ShuntCheck, SwitchCheck
 from selector.limits.measure import DesignAt
 from selector.parts import Amplifier, Resistor, Shunt, Switch

@@ -4,12 +4,11 @@ from __future__ import annotations
 
 from collections import Counter
 from collections.abc import Iterable, Mapping
-from dataclasses import replace
+from dataclasses import dataclass, replace
 from typing import TypeVar
 
 from selector.candidate import Conditions, Design, conditions_of
 from selector.candidate.design import in_stock
-from selector.frozen import dataclass
 from selector.limits import unfit
 from selector.parts import Amplifier, Bypass, Capacitor, Part, Resistor, Shunt, Switch
 from selector.search.found import LeftOut

@@ -2,13 +2,13 @@
 
 from __future__ import annotations
 
+from dataclasses import dataclass
 from math import inf
 
 import numpy as np
 from numpy.typing import NDArray
 
 from selector.candidate.operating import FilterAt
-from selector.frozen import dataclass
 from selector.search.bench import Bench
 from selector.search.ladder import Ladder
 from selector.search.lots import NONE

@@ -36,7 +36,7 @@ def lanes_of(bench: Bench, line: Line, solved: Solved, most: float) -> Iterator[
     first = np.flatnonzero(_promising(bench, solved, most) & np.isfinite(reached))
     if solved.steps is not None:
         steps = solved.steps[0]
-        for step in np.unique(steps[first]):
+        for step in sorted(set(steps[first].tolist())):
             if step < len(ladder):
                 lowest = _marked(bench, solved.inner.switched[0][first[steps[first] == step]])
                 yield from doubts.lanes(Lane(lowest, None, np.array(step)))
@@ -46,7 +46,7 @@ def lanes_of(bench: Bench, line: Line, solved: Solved, most: float) -> Iterator[
         first_place = np.array([place])
         steps = ladder.choices(_some(solved.inner, first_place), _some(solved.last, last))
         lowest = _marked(bench, solved.inner.switched[0][first_place])
-        for step in np.unique(steps):
+        for step in sorted(set(steps.tolist())):
             if step < len(ladder):
                 highest = _marked(bench, solved.last.switched[0][last[steps == step]])
                 yield from doubts.lanes(Lane(lowest, highest, np.array(step)))

@@ -13,7 +13,7 @@ from selector.units import CURRENT, FREQUENCY, MONEY, POWER, TIME, VOLTAGE
 class Section(BaseModel):
     """A table of the spec; SI units, degC, LSB and fractions, as interface.md names them."""
 
-    model_config = ConfigDict(frozen=True, extra="forbid", strict=True, populate_by_name=True)
+    model_config = ConfigDict(frozen=True, extra="forbid", strict=True, populate_by_name=True, defer_build=True)
 
 
 class Current(Section):

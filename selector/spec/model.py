@@ -21,15 +21,15 @@ class Spec(Section):
     accuracy: Accuracy
     limits: Limits
     supply: Supply
-    sense: Sense = Sense()
-    output: Output = Output()
+    sense: Sense = Sense.model_construct()
+    output: Output = Output.model_construct()
     converter: Converter
     ambient: Ambient
     signal: Signal
-    ranges: Ranges = Ranges()
-    filter: Filter = Filter()
-    parts: Parts = Parts()
-    rank: Rank = Rank()
+    ranges: Ranges = Ranges.model_construct()
+    filter: Filter = Filter.model_construct()
+    parts: Parts = Parts.model_construct()
+    rank: Rank = Rank.model_construct()
 
     @property
     def output_high_v(self) -> float:

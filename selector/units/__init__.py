@@ -30,7 +30,7 @@ from selector.units.quantities import (
     VOLTAGE_NOISE,
 )
 from selector.units.quantity import Quantity, QuantityError
-from selector.units.reading import is_unit, parse
+from selector.units.reading import is_unit, parse, plain_power
 from selector.units.writing import exact, shown
 
 __all__ = [
@@ -66,5 +66,6 @@ __all__ = [
     "exact",
     "is_unit",
     "parse",
+    "plain_power",
     "shown",
 ]

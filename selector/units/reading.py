@@ -102,6 +102,28 @@ def is_unit(text: str, quantity: Quantity) -> bool:
     return len(found) == 1 and found[0].quantity == quantity
 
 
+def plain_power(quantity: Quantity, *, bare: bool, unit: str | None = None) -> int | None:
+    """Return the power of ten of plain decimal numbers, as `parse` reads them with the same arguments.
+
+    None where a number without a unit is refused. `parse` gives the double nearest to such a number times that power.
+
+    Examples
+    --------
+    >>> from selector.units import FRACTION, RESISTANCE
+    >>> plain_power(RESISTANCE, bare=False, unit="kohm"), plain_power(RESISTANCE, bare=True)
+    (3, 0)
+    >>> plain_power(FRACTION, bare=False) is None
+    True
+    """
+    else_unit = _else_unit(quantity, bare=bare, unit=unit)
+    if else_unit is None:
+        return None
+    try:
+        return _power(joined(plain(else_unit)), else_unit, else_unit, quantity) if else_unit else 0
+    except QuantityError:
+        return None
+
+
 def _else_unit(quantity: Quantity, *, bare: bool, unit: str | None) -> str | None:
     """Return the unit that a number without one has, or None where it must not be without."""
     return unit or (quantity.unit if bare or not quantity.unit else None)

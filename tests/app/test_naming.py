@@ -7,7 +7,8 @@ from pathlib import Path
 
 import pytest
 
-from selector.app.naming import did_you_mean, file_name, kind_named, near_ones, shown_path, who
+from selector.app.kinds import kind_named
+from selector.app.naming import did_you_mean, file_name, near_ones, shown_path, who
 from selector.app.specs import overrides_of, weights_of
 from selector.errors import UsageRefused
 

@@ -7,7 +7,8 @@ from pathlib import Path
 
 import pytest
 
-from selector.catalogue import Change, in_memory, open_catalogue
+from selector.catalogue import in_memory, open_catalogue
+from selector.catalogue.merge import Change
 from selector.errors import InputRefused, Unusable, UsageRefused
 from selector.parts import KINDS, Part
 

@@ -30,7 +30,18 @@ def test_catalogue_needs_its_path() -> None:
         hoisted(["query", "--catalogue"])
 
 
-def test_command_is_the_first_word_that_is_no_option() -> None:
-    """The command is found wherever the global options stand."""
-    assert command_of(["query", "s"]) == "query"
-    assert command_of(["--version"]) == ""
+@pytest.mark.parametrize(
+    ("given", "command"),
+    [
+        (["query", "s"], "query"),
+        (["--catalogue", "query", "load", "s"], "load"),
+        (["load", "s", "--catalogue=query"], "load"),
+        (["--version"], ""),
+        (["--help", "query"], ""),
+        (["--", "query"], ""),
+        ([], ""),
+    ],
+)
+def test_command_is_the_first_word_behind_the_global_options(given: list[str], command: str) -> None:
+    """The command is found wherever the catalogue stands; behind another option or `--` there is none."""
+    assert command_of(given) == command

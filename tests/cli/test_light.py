@@ -51,3 +51,10 @@ def test_query_imports_no_tables(folder: Path) -> None:
     found = imported(folder, "query", str(CHECKOUT / "data" / "irrigation_pump.toml"))
     assert "numpy" in found
     assert found.isdisjoint(TABLES)
+
+
+def test_load_imports_no_tables(folder: Path) -> None:
+    """A load into a new catalogue, and one into a catalogue that is there, import neither tables nor arrays."""
+    for _ in range(2):
+        words = ("load", str(CHECKOUT / "data" / "parts" / "resistors.csv"), "--catalogue", str(folder / "new.db"))
+        assert imported(folder, *words).isdisjoint({*TABLES, "numpy"})

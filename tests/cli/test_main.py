@@ -11,6 +11,7 @@ import pytest
 
 from selector.cli import run as running
 from selector.cli.main import main
+from selector.cli.root import COMMANDS
 from selector.cli.signals import Ended
 
 KEPT = ("SIGINT", "SIGTERM", "SIGHUP")
@@ -70,6 +71,21 @@ def test_one_thread_for_arrays_unless_said_otherwise(monkeypatch: pytest.MonkeyP
     monkeypatch.setenv("OPENBLAS_NUM_THREADS", "2")
     assert main(["--version"]) == 0
     assert os.environ["OPENBLAS_NUM_THREADS"] == "2"
+
+
+@pytest.mark.parametrize("before", [[], ["--catalogue", "query"], ["--catalogue=query"]])
+def test_a_command_is_called_by_its_name(before: list[str], capsys: pytest.CaptureFixture[str]) -> None:
+    """A command is found behind the global options, also where the catalogue is named like another command."""
+    assert main([*before, "series", "--help"]) == 0
+    assert "Show preferred values near a value." in capsys.readouterr().out
+
+
+@pytest.mark.parametrize("words", [["--help"], ["--help", "query"], ["--catalogue", "x", "--help"]])
+def test_help_shows_every_command(words: list[str], capsys: pytest.CaptureFixture[str]) -> None:
+    """The program's own help lists all commands, whatever stands behind it."""
+    assert main(words) == 0
+    shown = capsys.readouterr().out
+    assert [name for name in COMMANDS if f"  {name} " not in shown] == []
 
 
 def test_no_command_is_wrong_usage_and_shows_the_help(capsys: pytest.CaptureFixture[str]) -> None:

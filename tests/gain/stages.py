@@ -68,12 +68,13 @@ def check_arrays(name: str, at: Stage) -> None:
     for index, (shunt, on) in enumerate(zip(SHUNTS.tolist(), ONS.tolist(), strict=True)):
         one = replace(at, shunt_ohm=shunt, on_ohm=on)
         one = replace(one, gain=LAWS[name].gain(at.figures, at.common_ohm, at.switched_ohm, on))
-        for of_many, of_one in zip(_answers(LAWS[name], many), _answers(LAWS[name], one), strict=True):
+        for of_many, of_one in zip(answers(LAWS[name], many), answers(LAWS[name], one), strict=True):
             element = np.broadcast_to(of_many, SHUNTS.shape)[index]
             assert float(element) == near(float(of_one))
 
 
-def _answers(found: Law, at: Stage) -> list[Real]:
+def answers(found: Law, at: Stage) -> list[Real]:
+    """Return what a law says of a stage, by all its methods."""
     of_stage = (
         found.common_sensitivity,
         found.switched_sensitivity,

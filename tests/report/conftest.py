@@ -11,7 +11,9 @@ from selector.bill import Offer, bill_lines
 from selector.candidate import Candidate, Design, Point, TermAmount, Uses, Verdict
 from selector.candidate.result import FilterFiguresShown, Limiting, RangeFigures
 from selector.parts import Amplifier, Capacitor, Resistor, Shunt, Switch, read_part
-from selector.report.answers import BillShown, Checked, Shortlist
+from selector.report.answers.bill import BillShown
+from selector.report.answers.check import Checked
+from selector.report.answers.query import Shortlist
 from selector.search import Judged, NothingFits, Searched
 from selector.search.found import LeftOut
 from selector.spec import Spec, spec_of

@@ -12,24 +12,16 @@ from selector.candidate import Design, conditions_of
 from selector.errors import UsageRefused
 from selector.ingest import read_stock
 from selector.report import FORMATS, render
-from selector.report.answers import (
-    Answer,
-    CatalogueShown,
-    CellRefused,
-    Checked,
-    ColumnRead,
-    FieldChange,
-    FileLoaded,
-    FoundPart,
-    KindCounted,
-    Loaded,
-    PartsChanged,
-    PartsFound,
-    PartsListed,
-    SeriesShown,
-    Shortlist,
-    SpecShown,
-)
+from selector.report.answers.answer import Answer
+from selector.report.answers.catalogue import CatalogueShown, KindCounted
+from selector.report.answers.changed import FieldChange, PartsChanged
+from selector.report.answers.check import Checked
+from selector.report.answers.found import FoundPart, PartsFound
+from selector.report.answers.loaded import CellRefused, ColumnRead, FileLoaded, Loaded
+from selector.report.answers.parts import PartsListed
+from selector.report.answers.query import Shortlist
+from selector.report.answers.series import SeriesShown
+from selector.report.answers.spec import SpecShown
 from selector.search import judge, search
 from selector.series import Pair, Preferred
 from selector.spec import KEYS, Spec, load_spec, spec_of

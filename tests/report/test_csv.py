@@ -9,7 +9,10 @@ from dataclasses import replace
 import pytest
 
 from selector.report import render
-from selector.report.answers import BillShown, Checked, PartsListed, Shortlist
+from selector.report.answers.bill import BillShown
+from selector.report.answers.check import Checked
+from selector.report.answers.parts import PartsListed
+from selector.report.answers.query import Shortlist
 
 
 def read(text: str) -> list[dict[str, str]]:

@@ -9,7 +9,9 @@ from typing import Any
 import pytest
 
 from selector.report import render
-from selector.report.answers import BillShown, Checked, Shortlist
+from selector.report.answers.bill import BillShown
+from selector.report.answers.check import Checked
+from selector.report.answers.query import Shortlist
 
 CANDIDATE = (
     *("rank", "score", "pareto", "uses", "power", "burden", "headroom", "cost", "currency", "parts", "ranges"),

@@ -7,7 +7,8 @@ from dataclasses import replace
 import pytest
 
 from selector.report import render
-from selector.report.answers import BillShown, Shortlist
+from selector.report.answers.bill import BillShown
+from selector.report.answers.query import Shortlist
 
 
 def test_a_table_has_its_heading_and_its_sides(bill: BillShown) -> None:

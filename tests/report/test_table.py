@@ -10,7 +10,10 @@ import pytest
 from selector.bill import Offer, bill_lines
 from selector.candidate import Design
 from selector.report import render
-from selector.report.answers import Answer, BillShown, Checked, Shortlist
+from selector.report.answers.answer import Answer
+from selector.report.answers.bill import BillShown
+from selector.report.answers.check import Checked
+from selector.report.answers.query import Shortlist
 from selector.report.layout import width_of, wrapped
 
 GOLDEN = Path(__file__).parent / "golden"

@@ -4,7 +4,7 @@ from __future__ import annotations
 
 from functools import partial
 
-from selector.report.answers import BillShown
+from selector.report.answers.bill import BillShown
 from selector.report.document import Document, Lines
 from selector.report.told import Json, Records, Told
 from selector.report.views.candidate import bill_block, cautions_block, held_back, name_of

@@ -4,7 +4,7 @@ from __future__ import annotations
 
 from functools import partial
 
-from selector.report.answers import CatalogueShown
+from selector.report.answers.catalogue import CatalogueShown
 from selector.report.document import Column, Document, Lines, Table
 from selector.report.told import Json, Records, Told
 from selector.report.words import many, number

@@ -8,7 +8,7 @@ from math import fsum, isclose
 
 from selector.candidate import Candidate, Point, Verdict
 from selector.limits import LIMITS
-from selector.report.answers import Checked
+from selector.report.answers.check import Checked
 from selector.report.document import Block, Column, Document, Lines, Table
 from selector.report.told import Json, Records, Told
 from selector.report.views.candidate import bill_block, cautions_block, filter_text, name_of, ranges_block

@@ -6,15 +6,17 @@ from typing import TYPE_CHECKING
 
 from selector.parts import Part, columns
 from selector.report.told import Json
-from selector.spec import Spec, entries
 
-if TYPE_CHECKING:  # parts and specs are shown without the arrays that candidates bring along
+if TYPE_CHECKING:  # parts are shown without specs, and both without the arrays that candidates bring along
     from selector.bill import BillLine, Offer
     from selector.candidate import Candidate, Design, Point
+    from selector.spec import Spec
 
 
 def spec_data(spec: Spec) -> dict[str, Json]:
     """Return every entry of a spec in SI numbers."""
+    from selector.spec import entries  # noqa: PLC0415 - parts are shown without specs
+
     return {
         name: {key: _plain(value) for key, value in entry.items()} if isinstance(entry, dict) else entry
         for name, entry in entries(spec).items()

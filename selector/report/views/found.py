@@ -4,7 +4,7 @@ from __future__ import annotations
 
 from functools import partial
 
-from selector.report.answers import PartsFound
+from selector.report.answers.found import PartsFound
 from selector.report.document import Column, Document, Lines, Table
 from selector.report.figures import main_figures
 from selector.report.told import Json, Records, Told

@@ -5,7 +5,7 @@ from __future__ import annotations
 from collections.abc import Iterator
 from functools import partial
 
-from selector.report.answers import CellRefused, ColumnRead, FileLoaded, Loaded
+from selector.report.answers.loaded import CellRefused, ColumnRead, FileLoaded, Loaded
 from selector.report.document import Block, Column, Document, Lines, Notes, Table
 from selector.report.told import Json, Records, Told
 from selector.report.views.changed import changes_block, changes_data

@@ -5,7 +5,7 @@ from __future__ import annotations
 from collections.abc import Iterator
 
 from selector.candidate import Candidate
-from selector.report.answers import Shortlist
+from selector.report.answers.query import Shortlist
 from selector.report.document import Block, Column, Lines, Notes, Table
 from selector.report.told import Json
 from selector.report.views.candidate import bill_block, cautions_block, error_block, name_of, ranges_block

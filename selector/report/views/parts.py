@@ -5,7 +5,7 @@ from __future__ import annotations
 from functools import partial
 
 from selector.parts import Part, cells_of
-from selector.report.answers import PartsListed
+from selector.report.answers.parts import PartsListed
 from selector.report.document import Column, Document, Lines, Table
 from selector.report.figures import main_figures
 from selector.report.told import Json, Records, Told

@@ -6,7 +6,7 @@ from functools import partial
 
 from selector.bill import Offer
 from selector.candidate import Candidate
-from selector.report.answers import Shortlist
+from selector.report.answers.query import Shortlist
 from selector.report.document import Block, Column, Document, Lines, Table
 from selector.report.told import Cell, Json, Records, Told
 from selector.report.views.candidate import blocks_of, held_back, name_of

@@ -4,7 +4,7 @@ from __future__ import annotations
 
 from functools import partial
 
-from selector.report.answers import SeriesShown
+from selector.report.answers.series import SeriesShown
 from selector.report.document import Column, Document, Lines, Table
 from selector.report.told import Json, Records, Told
 from selector.report.words import per_cent

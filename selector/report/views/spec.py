@@ -4,7 +4,7 @@ from __future__ import annotations
 
 from functools import partial
 
-from selector.report.answers import SpecShown
+from selector.report.answers.spec import SpecShown
 from selector.report.document import Column, Document, Table
 from selector.report.told import Json, Records, Told
 from selector.report.views.data import spec_data
