@@ -36,11 +36,6 @@ class FilterBank:
         """Return the number of pairs."""
         return len(self.resistors) * len(self.capacitors)
 
-    @property
-    def pairs(self) -> tuple[tuple[Resistor, Capacitor], ...]:
-        """Return every pair."""
-        return tuple(self.pair(index) for index in range(len(self)))
-
     def pair(self, index: int) -> tuple[Resistor, Capacitor]:
         """Return the parts of a pair."""
         row, column = divmod(index, len(self.capacitors))

@@ -59,7 +59,7 @@ def nothing_fits(bench: Bench, score: Score, progress: Progress | None) -> Nothi
     furthest = _furthest(bench, progress)
     counts = Counter(furthest.values())
     blocked = tuple((LIMITS[place].name, pieces) for place, pieces in sorted(counts.items()))
-    standing = Standing(1, variants=True)
+    standing = Standing(1, variants=False)
     Engine(replace(bench, objective=LargestUse(), held=ALL_LIMITS - RANKED), standing).run()
     best = standing.best()
     return NothingFits(len(furthest), blocked, present(best[0].chain, score) if best else None)

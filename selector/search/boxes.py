@@ -142,8 +142,10 @@ def _enclosed(value: object) -> Interval:
 
 
 def possible(measure: Measure) -> Truths:
-    """Return whether a measure of intervals can be met."""
-    return np.asarray(replace(measure, value=lower(measure.value), allowed=upper(measure.allowed)).meets, dtype=bool)
+    """Return whether a measure of intervals can be met; what cannot be worked out can."""
+    value, allowed = lower(measure.value), upper(measure.allowed)
+    meets = np.asarray(replace(measure, value=value, allowed=allowed).meets, dtype=bool)
+    return np.asarray(meets | np.isnan(value) | np.isnan(allowed))
 
 
 def _first_use(bench: Bench, block: Block, high_a: Numbers) -> Numbers:

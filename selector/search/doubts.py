@@ -4,14 +4,13 @@ from __future__ import annotations
 
 from collections.abc import Iterator
 from dataclasses import dataclass, replace
-from math import ceil, inf, isfinite
-
-import numpy as np
+from math import inf, isfinite
 
 from selector.candidate.design import cost_or_inf, in_stock
 from selector.search.bench import Bench
 from selector.search.ladder import Ladder
 from selector.search.lots import NONE
+from selector.search.prices import spare_of
 from selector.search.rows import Line
 from selector.search.solve import Lane
 
@@ -41,7 +40,7 @@ class Doubts:
             law.copies,
             0 if law.switched_name is None else line.lot.range_count,
             common,
-            _spare(bench, line),
+            float(spare_of(bench, line)[0]),
             bool(bench.lifted) and isfinite(bench.conditions.settle_s),
         )
 
@@ -53,12 +52,13 @@ class Doubts:
             return
         place = self._place(step)
         scarce = place != NONE and self.places > 0 and self._short(step, place)
-        most = self.spare - self._cost(step)
+        most = self.spare - self._cost(step) if isfinite(self.spare) else inf
         certain = replace(lane, barred=place if scarce else NONE, cost_most=most)
-        yield certain
+        if most > -inf:
+            yield certain
         if scarce:
             yield replace(lane, step=None, doubtful=True, needed=place)
-        if isfinite(most) and most < self._dearest():
+        if most < self._dearest():
             yield replace(lane, step=None, doubtful=True, barred=certain.barred, cost_above=most)
 
     def of_single(self, step: int, switched: int) -> bool:
@@ -86,18 +86,3 @@ class Doubts:
 
     def _dearest(self) -> float:
         return self.copies * self.places * max((cost_or_inf(part) for part in self.bench.shelf.resistors), default=0.0)
-
-
-def _spare(bench: Bench, line: Line) -> float:
-    """Return what the cost limit leaves beside shunt, amplifier, switch and common resistor."""
-    limit = bench.conditions.cost_limit
-    if not isfinite(limit) or "cost" in bench.lifted:
-        return inf
-    shelf, lot = bench.shelf, line.lot
-    fixed = cost_or_inf(shelf.shunts[int(lot.shunt[0])]) + cost_or_inf(lot.family.amplifiers[int(lot.amplifier[0])])
-    if lot.switch is not None and lot.range_count > 1:
-        switch = shelf.switches[int(lot.switch[0])]
-        fixed += ceil(lot.range_count / switch.channels) * cost_or_inf(switch)
-    if int(line.common[0]) != NONE:
-        fixed += lot.family.law.copies * cost_or_inf(bench.resistors.parts[int(line.common[0])])
-    return float(np.subtract(limit, fixed)) if isfinite(fixed) else -inf

@@ -75,14 +75,19 @@ class Engine:
             upto = min(least * factor, self._most(piece.pair))
             if upto <= floor or least > self._most(piece.pair):
                 return
-            paths = chains.up_to(upto, floor, cost_most)
+            paths = chains.up_to(upto, floor, cost_most, ordered=not self._first_only)
             if floor > -inf:
                 paths = iter(sorted(paths, key=lambda path: path.figure))
             for path in paths:
                 placed = self._judge(stages, piece, path)
-                if (placed and ordered and rounded(path.figure) == rounded(least)) or least > self._most(piece.pair):
+                if (placed and ordered and self._leads(piece, least)) or least > self._most(piece.pair):
                     return
             floor = upto
+
+    def _leads(self, piece: Piece, least: float) -> bool:
+        """Return whether what a combination of the pair must beat counts as equal to the least figure, or as better."""
+        rival = self._standing.to_beat(piece.pair)
+        return rival is not None and rival.rank[0] <= rounded(least)
 
     def _judge(self, stages: Stages, piece: Piece, path: Path) -> bool:
         """Judge a chain in full and place it; return whether it was placed or could not have been the better one."""

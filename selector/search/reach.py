@@ -47,8 +47,8 @@ def below_last(bench: Bench, inner: Ranges, last: Ranges) -> Indices:
     """
     if bench.holds_headroom or not bench.ordered:
         return np.full(last.shape, inner.shape[1])
-    larger = inner.gain()[:, :, None] > last.gain()[:, None, :]
-    return np.asarray(larger.sum(axis=1))
+    each = zip(inner.gain(), last.gain(), strict=True)  # gains fall along a row
+    return np.stack([np.searchsorted(-below, -here, side="left") for below, here in each])
 
 
 def reached_above(bench: Bench, below: Below, here: Ranges, end: Indices) -> Numbers:

@@ -3,16 +3,19 @@
 from __future__ import annotations
 
 from dataclasses import dataclass
+from math import inf, isfinite
 
 import numpy as np
 from numpy.typing import NDArray
 
 from selector.candidate import Design, Pairing, ShuntAt
+from selector.candidate.design import cost_or_inf
 from selector.candidate.figures import NO_SWITCH
 from selector.candidate.operating import AmplifierAt, SwitchAt
+from selector.gain import LAWS
 from selector.limits import AmplifierCheck, DesignCheck, Limit, Measure, PairCheck, ShuntCheck, SwitchCheck
 from selector.limits.measure import DesignAt
-from selector.parts import Amplifier, Resistor, Shunt, Switch
+from selector.parts import Amplifier, Capacitor, Resistor, Shunt, Switch
 from selector.search.bench import Bench
 from selector.search.lots import Family, Stock
 from selector.search.rows import Line
@@ -21,6 +24,15 @@ from selector.search.stacks import Indices, columns, taken
 Truths = NDArray[np.bool_]
 PLENTY = 10**12
 FREE = Resistor.model_construct(part="", resistance=1.0, tolerance=0.0, tempco=0.0, unit_cost=0.0, quantity=PLENTY)
+
+
+def _cheapest(bench: Bench) -> tuple[Resistor, Capacitor | None]:
+    """Return stand-ins for any resistor and capacitor that cost as much as the cheapest, of which there is plenty."""
+    resistors = min((cost_or_inf(part) for part in bench.shelf.resistors), default=inf)
+    capacitor = min(bench.shelf.capacitors, key=cost_or_inf, default=None)
+    plenty = {"quantity": PLENTY, "generic": False}
+    resistor = FREE.model_copy(update={"unit_cost": resistors if isfinite(resistors) else None})
+    return resistor, None if capacitor is None else capacitor.model_copy(update=plenty)
 
 
 @dataclass(frozen=True)
@@ -82,8 +94,12 @@ def _met(measure: Measure | None) -> Truths:
 
 
 def affordable(bench: Bench, shunt: Shunt, amplifier: Amplifier, switch: Switch | None, range_count: int) -> bool:
-    """Return whether the parts of a frame meet the held limits on whole designs beside gain resistors of no account."""
-    return _stands(bench, Design((shunt,), amplifier, switch, None, (FREE,) * range_count))
+    """Return whether the parts of a frame meet the held limits on whole designs beside the cheapest other parts."""
+    resistor, capacitor = _cheapest(bench)
+    law = LAWS[amplifier.gain_law]
+    gain = (resistor,) * range_count if law.switched_name is not None else None
+    common = resistor if law.common_name is not None else None
+    return _stands(bench, Design((shunt,), amplifier, switch, common, gain, resistor, capacitor))
 
 
 def usable_of(bench: Bench, line: Line) -> Truths:

@@ -12,6 +12,7 @@ from selector.candidate.operating import FilterAt
 from selector.search.bench import Bench
 from selector.search.ladder import Ladder
 from selector.search.lots import NONE
+from selector.search.prices import payable
 from selector.search.reach import Below, before, below_last, reached_above
 from selector.search.rows import Line, Ranges, Spent, first_use, ranges_of, with_filter
 from selector.search.screen import usable_of
@@ -64,6 +65,8 @@ def solve(bench: Bench, line: Line, lanes: list[Lane]) -> Solved:
     """Return the least figures of rows, one lane each; all lanes have a filter, or none has."""
     with np.errstate(all="ignore"):
         usable = _unbarred(usable_of(bench, line), lanes)
+        affords = payable(bench, line)
+        usable = usable if affords is None else usable & affords
         last = ranges_of(bench, line, _narrowed(usable, [lane.last for lane in lanes]), last=True)
         if line.lot.range_count == 1:
             return _single(bench, line, lanes, last)
@@ -77,8 +80,13 @@ def solve(bench: Bench, line: Line, lanes: list[Lane]) -> Solved:
             reached.append(reached_above(bench, Below.of(inner, reached[-1]), inner, end))
         use = reached_above(bench, Below.of(inner, reached[-1]), last, below_last(bench, inner, last))
         spent = Spent.of(bench, last)
-        figure = spent.figures(bench, use)
+        figure = _known(spent.figures(bench, use))
     return Solved(inner, last, tuple(reached), use, spent, figure, figure.min(axis=1), steps)
+
+
+def _known(figure: Numbers) -> Numbers:
+    """Return figures in which what cannot be worked out is out."""
+    return np.where(np.isnan(figure), np.inf, figure)
 
 
 def _single(bench: Bench, line: Line, lanes: list[Lane], last: Ranges) -> Solved:
@@ -96,7 +104,7 @@ def _single(bench: Bench, line: Line, lanes: list[Lane], last: Ranges) -> Solved
     last = with_filter(bench, last, filters)
     use = first_use(bench, last)
     spent = Spent.of(bench, last)
-    figure = spent.figures(bench, use)
+    figure = _known(spent.figures(bench, use))
     return Solved(None, last, (), use, spent, figure, figure.min(axis=1), steps)
 
 

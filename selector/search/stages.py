@@ -133,6 +133,8 @@ class Stages:
     def _pairs(self, batch: list[Piece], most: Most) -> Iterator[Piece]:
         """Yield the pairs with a bound of any switch and any common resistor."""
         for piece in self._better(batch, self._coarse, most):
+            if not self._affordable(piece):
+                continue
             yield replace(piece, stage=Stage.BLOCKS if len(piece.commons) > 1 else Stage.FRAMES)
 
     def _blocks(self, batch: list[Piece], most: Most) -> Iterator[Piece]:

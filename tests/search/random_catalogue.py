@@ -21,14 +21,19 @@ from tests.search.random_spec import entries_of
 if TYPE_CHECKING:
     from selector.parts import Part
     from selector.spec import Spec
+    from tests.search.random_parts import Fields
 
 
 def catalogue(
-    seed: int, *, resistors: tuple[int, int] = (2, 6), most: int = 3
+    seed: int, *, resistors: tuple[int, int] = (2, 6), most: int = 3, changes: Fields | None = None
 ) -> tuple[Spec, dict[str, tuple[Part, ...]]]:
-    """Return a spec and a catalogue; `resistors` bounds their number, `most` the number of ranges."""
+    """Return a spec and a catalogue; `resistors` bounds their number, `most` the number of ranges.
+
+    `changes` holds entries that the spec has in any case; one of None is taken out.
+    """
     random = Random(seed)
-    entries = entries_of(random, most)
+    entries = entries_of(random, most) | (changes or {})
+    entries = {key: value for key, value in entries.items() if value is not None}
     target_ohm = entries["limits.burden"] / entries["current.max"]
     laws = [random.choice(LAWS) for _ in range(random.randint(1, 3))]
     values = resistances(random, laws, 0.8 * entries["converter.reference"] / entries["limits.burden"])
