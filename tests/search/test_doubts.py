@@ -28,3 +28,16 @@ def test_search_equals_the_plain_walk_where_filters_are_taken_away(seed: int) ->
     ranks = [rank for rank, _ in everything]
     assert ranks_of(search(spec, stock, top=None)) == best_of_pairs(ranks)
     assert ranks_of(search(spec, stock, top=None, variants=True)) == ranks
+
+
+@pytest.mark.parametrize("seed", [48, 50, 144, 156, 167, 218, 317])
+def test_filter_without_a_cost_is_no_end_under_a_cost_limit(seed: int) -> None:
+    """Where the filter that a design would take states no cost, it takes the next one that can be paid."""
+    spec, stock = scarce(seed)
+    unpriced = [
+        part.model_copy(update={"unit_cost": None}) if place % 2 else part
+        for place, part in enumerate(stock["capacitor"])
+    ]
+    stock = stock | {"capacitor": tuple(unpriced)}
+    ranks = [rank for rank, _ in walked(spec, stock, variants=True)]
+    assert ranks_of(search(spec, stock, top=None)) == best_of_pairs(ranks)

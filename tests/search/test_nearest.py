@@ -10,6 +10,7 @@ from selector.search.standing import rank_of
 from selector.spec import spec_of
 from tests.search.random_parts import amplifier_row, capacitor_row, resistor_row, shunt_row, stock_of, switch_row
 from tests.search.random_spec import entries_of
+from tests.search.small import capacitor, part, resistor, spec, stock
 from tests.search.walk import nearest
 
 if TYPE_CHECKING:
@@ -71,3 +72,16 @@ def test_nearest_combination_is_that_of_the_plain_walk() -> None:
             wrong += [seed] if close != nearest(spec, stock) else []
     assert wrong == []
     assert seen > 15
+
+
+def test_ties_of_the_nearest_are_not_judged_one_by_one() -> None:
+    """Where the power alone is out of reach, all chains tie, and few of them are judged in full."""
+    resistors = [resistor(f"R{number:03}", 100.0 * 1.06**number) for number in range(100)]
+    amplifier = part("amplifier", gain_law="one-resistor", gain=None, gain_resistance=1e5)
+    figures = {"on_resistance": 5.0, "on_resistance_spread": 1.0, "leakage": 1e-9, "supply_min": 1.6, "supply_max": 5.5}
+    switch = part("switch", part="W", channels=4, **figures)
+    parts = (amplifier, switch, *resistors, capacitor("C", 1e-7))
+    found = search(spec(limits__power=1e-6, ranges__most=3), stock(*parts))
+    assert found.nothing_fits is not None
+    assert found.nothing_fits.nearest is not None
+    assert found.searched.evaluated < 200
