@@ -24,6 +24,7 @@ from selector.gain import LAWS
 from selector.parts import Amplifier, Capacitor, Part, Resistor
 from selector.search.order import cost_key, rounded
 from selector.search.shelf import Shelf
+from selector.search.stacks import stacked
 
 Places = NDArray[np.int64]
 Numbers = NDArray[np.float64]
@@ -100,9 +101,9 @@ def arrays_of(shelf: Shelf) -> Arrays:
         filters,
         np.array([r for r, _ in places], dtype=np.int64),
         np.array([c for _, c in places], dtype=np.int64),
-        _stacked([shunt_figures(part) for part in shelf.shunts]),
-        _stacked([resistor_figures(part) for part in shelf.resistors]),
-        _stacked([filter_figures(*pair) for pair in filters]),
+        stacked([shunt_figures(part) for part in shelf.shunts]),
+        stacked([resistor_figures(part) for part in shelf.resistors]),
+        stacked([filter_figures(*pair) for pair in filters]),
         *(np.array([in_stock(part) for part in parts], dtype=float) for parts in (shelf.resistors, shelf.capacitors)),
         *(_costs(parts) for parts in (shelf.shunts, shelf.resistors, shelf.capacitors)),
     )
@@ -130,11 +131,6 @@ def _order(resistor: Resistor, capacitor: Capacitor) -> tuple[float, tuple[bool,
 
 def _costs(parts: Sequence[Part]) -> Numbers:
     return np.array([cost_or_inf(part) for part in parts])
-
-
-def _stacked(each: Sequence[Figures]) -> Figures:
-    kind = type(each[0])
-    return kind(*(np.array([getattr(one, field.name) for one in each]) for field in fields(kind)))
 
 
 def _taken(figures: Figures, places: Places) -> Figures:

@@ -23,7 +23,7 @@ class Place:
 class Design:
     """The parts of one combination; `gain` is None for a law without gain resistors.
 
-    A filter part that is None is still to be chosen. `in_line` holds the parts that are in no catalogue.
+    A filter part that is None is still to be chosen.
     """
 
     shunts: tuple[Shunt, ...]

@@ -6,12 +6,8 @@ speed, an inductance of 0.
 
 from __future__ import annotations
 
-from collections.abc import Sequence
-from dataclasses import dataclass, fields
+from dataclasses import dataclass
 from math import inf
-from typing import TypeVar
-
-import numpy as np
 
 from selector.candidate.elementwise import stated
 from selector.gain import LAWS, Law, LawFigures
@@ -122,14 +118,6 @@ class FilterFigures:
 
 NO_SWITCH = SwitchFigures(0.0, 0.0, 0.0, -inf, inf)
 NO_RESISTOR = ResistorFigures(0.0, 0.0, 0.0)
-
-Figures = TypeVar("Figures", ResistorFigures, FilterFigures)
-
-
-def stacked(each: Sequence[Figures]) -> Figures:
-    """Return the figures of several parts as arrays of shape (len(each),)."""
-    first = each[0]
-    return type(first)(*(np.array([getattr(one, field.name) for one in each]) for field in fields(first)))
 
 
 def shunt_figures(part: Shunt) -> ShuntFigures:

@@ -14,7 +14,7 @@ from selector.search.lots import NONE
 from selector.search.reach import before
 from selector.search.rows import Ranges, use_between
 from selector.search.solve import Solved
-from selector.search.stacks import Indices, mapped
+from selector.search.stacks import Indices
 
 Numbers = NDArray[np.float64]
 Truths = NDArray[np.bool_]
@@ -71,7 +71,7 @@ class Links:
         if self._inner is None:
             return np.zeros(0)
         if last not in self._of_last:
-            one = _some(self._solved.last, np.array([last]))
+            one = self._solved.last.some(np.array([last]))
             self._of_last[last] = self._above(one, np.arange(self._inner.shape[1]))
         return self._of_last[last]
 
@@ -79,7 +79,7 @@ class Links:
         """Return the use of an inner range above another."""
         if self._inner is None:
             return 0.0
-        return float(self._above(_some(self._inner, np.array([here])), np.array([below]))[0])
+        return float(self._above(self._inner.some(np.array([here])), np.array([below]))[0])
 
     def graph(self, last: int, most: float) -> Graph:
         """Return what can follow what in chains with a figure of at most `most`."""
@@ -154,15 +154,3 @@ def _over(begins: Indices, ends: Indices, cost: Numbers, end: np.ufunc, none: fl
         part = found[begins[one] : ends[one]]
         end(part, cost[one], out=part)
     return found
-
-
-def _some(ranges: Ranges, places: Indices) -> Ranges:
-    """Return some ranges of a single row."""
-    width = ranges.shape[1]
-
-    def some(array: NDArray[np.float64]) -> NDArray[np.float64]:
-        return array[:, places] if array.ndim > 1 and array.shape[1] == width else array
-
-    return Ranges(
-        ranges.switched[:, places], mapped(ranges.at, some), ranges.stands[:, places], mapped(ranges.error, some)
-    )

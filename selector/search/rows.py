@@ -15,7 +15,7 @@ from selector.candidate.uses import power_w, use_headroom
 from selector.limits import FilterCheck, LinkCheck, RangeCheck, use_of, worst_point
 from selector.search.bench import Bench
 from selector.search.lots import NONE, Lot
-from selector.search.stacks import Indices, taken
+from selector.search.stacks import Indices, mapped, taken
 
 Numbers = NDArray[np.float64]
 Truths = NDArray[np.bool_]
@@ -61,6 +61,15 @@ class Ranges:
     def gain(self) -> Numbers:
         """Return the gains, V/V."""
         return np.broadcast_to(np.asarray(self.at.gain, dtype=float), self.shape)
+
+    def some(self, places: Indices) -> Ranges:
+        """Return some columns."""
+        width = self.shape[1]
+
+        def some(array: Numbers) -> Numbers:
+            return array[:, places] if array.ndim > 1 and array.shape[1] == width else array
+
+        return Ranges(self.switched[:, places], mapped(self.at, some), self.stands[:, places], mapped(self.error, some))
 
 
 def ranges_of(bench: Bench, line: Line, usable: Truths, *, last: bool) -> Ranges:

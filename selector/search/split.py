@@ -7,13 +7,12 @@ from collections.abc import Iterator
 import numpy as np
 from numpy.typing import NDArray
 
-from selector.candidate import Operating
 from selector.search.bench import Bench
 from selector.search.doubts import Doubts
 from selector.search.ladder import Ladder
-from selector.search.rows import Line, Ranges
+from selector.search.rows import Line
 from selector.search.solve import Lane, Solved
-from selector.search.stacks import Indices, mapped
+from selector.search.stacks import Indices
 
 Numbers = NDArray[np.float64]
 Truths = NDArray[np.bool_]
@@ -44,7 +43,7 @@ def lanes_of(bench: Bench, line: Line, solved: Solved, most: float) -> Iterator[
     last = np.flatnonzero(solved.figure[0] <= most)
     for place in first:
         first_place = np.array([place])
-        steps = ladder.choices(_some(solved.inner, first_place), _some(solved.last, last))
+        steps = ladder.choices(solved.inner.some(first_place).at, solved.last.some(last).at)
         lowest = _marked(bench, solved.inner.switched[0][first_place])
         for step in sorted(set(steps.tolist())):
             if step < len(ladder):
@@ -61,7 +60,7 @@ def _single(bench: Bench, line: Line, solved: Solved, ladder: Ladder, most: floa
     doubts = Doubts.of(bench, line)
     for place in last:
         if solved.steps is None:
-            one = _some(solved.last, np.array([place]))
+            one = solved.last.some(np.array([place])).at
             step = int(ladder.choices(one, one)[0])
         else:
             step = int(solved.steps[0, place])
@@ -86,9 +85,3 @@ def _marked(bench: Bench, places: Indices) -> Truths:
     marks = np.zeros(max(1, len(bench.resistors)), dtype=bool)
     marks[places] = True
     return marks
-
-
-def _some(ranges: Ranges, places: Indices) -> Operating:
-    """Return some ranges of a single row."""
-    width = ranges.shape[1]
-    return mapped(ranges.at, lambda array: array[:, places] if array.ndim > 1 and array.shape[1] == width else array)

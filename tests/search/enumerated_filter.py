@@ -16,11 +16,11 @@ from selector.candidate.figures import (
     ResistorFigures,
     filter_figures,
     resistor_figures,
-    stacked,
 )
 from selector.limits import LIMITS, FilterCheck, fits
 from selector.physics.filters import corner_hz
 from selector.search.order import cost_key, rounded
+from selector.search.stacks import stacked
 from tests.search.enumerated_parts import NONE, cost_of_each, pieces_of_each, switches_suffice
 
 if TYPE_CHECKING:

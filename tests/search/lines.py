@@ -25,6 +25,7 @@ if TYPE_CHECKING:
     from selector.spec import Spec
 
 LOOSE: dict[str, Any] = {
+    "limits.cost": None,  # what cannot be paid is out of a row before its chains are
     "accuracy.bands": None,
     "accuracy.reading": 0.5,
     "accuracy.floor": 1e-3,
