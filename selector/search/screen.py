@@ -12,10 +12,9 @@ from selector.candidate import Design, Pairing, ShuntAt
 from selector.candidate.design import cost_or_inf
 from selector.candidate.figures import NO_SWITCH
 from selector.candidate.operating import AmplifierAt, SwitchAt
-from selector.gain import LAWS
 from selector.limits import AmplifierCheck, DesignCheck, Limit, Measure, PairCheck, ShuntCheck, SwitchCheck
 from selector.limits.measure import DesignAt
-from selector.parts import Amplifier, Capacitor, Resistor, Shunt, Switch
+from selector.parts import Amplifier, Capacitor, Resistor
 from selector.search.bench import Bench
 from selector.search.lots import Family, Stock
 from selector.search.rows import Line
@@ -26,7 +25,7 @@ PLENTY = 10**12
 FREE = Resistor.model_construct(part="", resistance=1.0, tolerance=0.0, tempco=0.0, unit_cost=0.0, quantity=PLENTY)
 
 
-def _cheapest(bench: Bench) -> tuple[Resistor, Capacitor | None]:
+def cheapest(bench: Bench) -> tuple[Resistor, Capacitor | None]:
     """Return stand-ins for any resistor and capacitor that cost as much as the cheapest, of which there is plenty."""
     resistors = min((cost_or_inf(part) for part in bench.shelf.resistors), default=inf)
     capacitor = min(bench.shelf.capacitors, key=cost_or_inf, default=None)
@@ -93,15 +92,6 @@ def _met(measure: Measure | None) -> Truths:
     return np.ones((1, 1), dtype=bool) if measure is None else np.atleast_2d(np.asarray(measure.meets, dtype=bool))
 
 
-def affordable(bench: Bench, shunt: Shunt, amplifier: Amplifier, switch: Switch | None, range_count: int) -> bool:
-    """Return whether the parts of a frame meet the held limits on whole designs beside the cheapest other parts."""
-    resistor, capacitor = _cheapest(bench)
-    law = LAWS[amplifier.gain_law]
-    gain = (resistor,) * range_count if law.switched_name is not None else None
-    common = resistor if law.common_name is not None else None
-    return _stands(bench, Design((shunt,), amplifier, switch, common, gain, resistor, capacitor))
-
-
 def usable_of(bench: Bench, line: Line) -> Truths:
     """Return which resistors may be taken in rows: of shape (resistors,), or (rows, resistors) where rows differ.
 
@@ -119,7 +109,7 @@ def usable_of(bench: Bench, line: Line) -> Truths:
     amplifier = _plenty(line)
     for row, place in enumerate(line.common):
         part = resistors.parts[int(place)]
-        rows[row, place] &= _stands(bench, Design((), amplifier, None, part, (part,)))
+        rows[row, place] &= design_stands(bench, Design((), amplifier, None, part, (part,)))
     return rows
 
 
@@ -128,7 +118,7 @@ def _in_numbers(bench: Bench, line: Line) -> Truths:
     key = (line.lot.family.law.name, bench.held)
     if key not in bench.enough:
         amplifier = _plenty(line)
-        each = [_stands(bench, Design((), amplifier, None, None, (one,))) for one in bench.resistors.parts]
+        each = [design_stands(bench, Design((), amplifier, None, None, (one,))) for one in bench.resistors.parts]
         bench.enough[key] = np.array(each)
     return bench.enough[key]
 
@@ -139,7 +129,8 @@ def _plenty(line: Line) -> Amplifier:
     return line.lot.family.amplifiers[0].model_copy(update=plenty)
 
 
-def _stands(bench: Bench, design: Design) -> bool:
+def design_stands(bench: Bench, design: Design) -> bool:
+    """Return whether a design meets the held limits on whole designs."""
     at = DesignAt(bench.conditions, design)
     checks = (check for limit in bench.limits for check in limit.checks if isinstance(check, DesignCheck))
     return all(measure is None or bool(measure.meets) for measure in (check.measure(at) for check in checks))

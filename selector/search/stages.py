@@ -4,7 +4,7 @@ from __future__ import annotations
 
 from collections.abc import Callable, Iterator
 from dataclasses import replace
-from math import inf
+from math import inf, isfinite
 
 import numpy as np
 from numpy.typing import NDArray
@@ -22,7 +22,7 @@ from selector.search.interval import lower
 from selector.search.lots import NONE, Family, Lot, Stock
 from selector.search.piece import Piece, Stage
 from selector.search.rows import Line
-from selector.search.screen import FREE, Screen, affordable
+from selector.search.screen import FREE, Screen, cheapest, design_stands
 from selector.search.solve import Solved, solve
 from selector.search.split import lanes_of
 from selector.search.standing import PairKey
@@ -46,6 +46,7 @@ class Stages:
         self._coarse = Cells(bench.conditions, *COARSE, holds_headroom=headroom)
         self._fine = Cells(bench.conditions, *FINE, holds_headroom=headroom)
         self._single = Cells(bench.conditions, *SINGLE, holds_headroom=headroom)
+        self._others = cheapest(bench)
         self._screen = None if bench.stock is None else Screen(bench, bench.stock, bench.limits)
         self._switches = np.empty(0, dtype=np.int64) if self._screen is None else self._screen.switches()
 
@@ -133,7 +134,7 @@ class Stages:
     def _pairs(self, batch: list[Piece], most: Most) -> Iterator[Piece]:
         """Yield the pairs with a bound of any switch and any common resistor."""
         for piece in self._better(batch, self._coarse, most):
-            if not self._affordable(piece):
+            if isfinite(self._bench.conditions.cost_limit) and not self._affordable(piece):
                 continue
             yield replace(piece, stage=Stage.BLOCKS if len(piece.commons) > 1 else Stage.FRAMES)
 
@@ -170,11 +171,19 @@ class Stages:
                 yield group[begin : begin + size]
 
     def _affordable(self, piece: Piece) -> bool:
+        """Return whether the settled parts meet the held limits on whole designs beside the cheapest other parts."""
         bench = self._bench
         if not bench.conditions.stock_only and bench.conditions.cost_limit == inf:
             return True
-        part = None if piece.switch == NONE else bench.shelf.switches[piece.switch]
-        return affordable(bench, *self._parts(piece), part, piece.range_count)
+        law, (resistor, capacitor) = self._family(piece.family).law, self._others
+        design = replace(
+            self.design(piece, ()),
+            common=resistor if law.common_name is not None else None,
+            gain=(resistor,) * piece.range_count if law.switched_name is not None else None,
+            filter_resistor=resistor,
+            filter_capacitor=capacitor,
+        )
+        return design_stands(bench, design)
 
     def _parts(self, piece: Piece) -> tuple[Shunt, Amplifier]:
         return self._bench.shelf.shunts[piece.shunt], self._family(piece.family).amplifiers[piece.amplifier]
