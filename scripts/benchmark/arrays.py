@@ -3,7 +3,7 @@
 from __future__ import annotations
 
 from collections.abc import Iterator, Sequence
-from dataclasses import dataclass, fields
+from dataclasses import dataclass
 from typing import TypeVar
 
 import numpy as np
@@ -24,7 +24,7 @@ from selector.gain import LAWS
 from selector.parts import Amplifier, Capacitor, Part, Resistor
 from selector.search.order import cost_key, rounded
 from selector.search.shelf import Shelf
-from selector.search.stacks import stacked
+from selector.search.stacks import stacked, taken
 
 Places = NDArray[np.int64]
 Numbers = NDArray[np.float64]
@@ -62,21 +62,21 @@ class Rows:
 
     def shunts(self) -> ShuntFigures:
         """Return the figures of the shunts."""
-        return _taken(self.arrays.shunt_figures, self.shunt)
+        return taken(self.arrays.shunt_figures, self.shunt)
 
     def commons(self) -> ResistorFigures:
         """Return the figures of the common resistors."""
         has = LAWS[self.amplifier.gain_law].common_name is not None
-        return _taken(self.arrays.resistor_figures, self.common) if has else NO_RESISTOR
+        return taken(self.arrays.resistor_figures, self.common) if has else NO_RESISTOR
 
     def gains(self) -> ResistorFigures:
         """Return the figures of the gain resistors."""
         has = LAWS[self.amplifier.gain_law].switched_name is not None
-        return _taken(self.arrays.resistor_figures, self.gain) if has else NO_RESISTOR
+        return taken(self.arrays.resistor_figures, self.gain) if has else NO_RESISTOR
 
     def filters(self) -> FilterFigures:
         """Return the figures of the filters."""
-        return _taken(self.arrays.filter_figures, self.pair)
+        return taken(self.arrays.filter_figures, self.pair)
 
     def design(self, row: int) -> Design:
         """Return the parts of a combination."""
@@ -131,7 +131,3 @@ def _order(resistor: Resistor, capacitor: Capacitor) -> tuple[float, tuple[bool,
 
 def _costs(parts: Sequence[Part]) -> Numbers:
     return np.array([cost_or_inf(part) for part in parts])
-
-
-def _taken(figures: Figures, places: Places) -> Figures:
-    return type(figures)(*(getattr(figures, field.name)[places] for field in fields(figures)))

@@ -10,10 +10,11 @@ import numpy as np
 from numpy.typing import NDArray
 
 from selector.candidate import Conditions
-from selector.limits import LIMITS, FilterCheck, Limit, PointCheck
+from selector.limits import LIMITS, FilterCheck, Limit, LinkCheck, PointCheck, RangeCheck
 from selector.limits.each.headroom import LIMIT as HEADROOM
 from selector.limits.each.range_order import LIMIT as RANGE_ORDER
 from selector.search.bank import FilterBank, bank_of
+from selector.search.checks import checks_of
 from selector.search.ladder import Ladder, ladder_of
 from selector.search.lots import Stock, stock_of
 from selector.search.objective import Objective
@@ -60,17 +61,39 @@ class Bench:
         return tuple(limit for limit in LIMITS if limit.name in self.held)
 
     @cached_property
+    def last_checks(self) -> tuple[RangeCheck, ...]:
+        """Return the held checks of a last range by itself."""
+        return checks_of(self.limits, RangeCheck)
+
+    @cached_property
+    def inner_checks(self) -> tuple[RangeCheck, ...]:
+        """Return the held checks of any other range by itself."""
+        return tuple(check for check in self.last_checks if not check.last_only)
+
+    @cached_property
+    def link_checks(self) -> tuple[LinkCheck, ...]:
+        """Return the held checks of a range above another."""
+        return checks_of(self.limits, LinkCheck)
+
+    @cached_property
+    def filter_checks(self) -> tuple[FilterCheck, ...]:
+        """Return the held checks of a range with its filter."""
+        return checks_of(self.limits, FilterCheck)
+
+    @cached_property
     def needs_filter(self) -> bool:
         """Return whether a held limit can only be judged with the output filter."""
-        return any(
-            limit.thins or any(isinstance(check, FilterCheck | PointCheck) for check in limit.checks)
-            for limit in self.limits
-        )
+        return bool(self.filter_checks) or self.holds_points or any(limit.thins for limit in self.limits)
 
     @cached_property
     def holds_points(self) -> bool:
         """Return whether the error is held to what is allowed."""
-        return any(isinstance(check, PointCheck) for limit in self.limits for check in limit.checks)
+        return bool(checks_of(self.limits, PointCheck))
+
+    @cached_property
+    def cheapest_filter(self) -> float:
+        """Return what the cheapest filter costs, infinite where none states a cost."""
+        return float(np.min(self.bank.resistor_costs + self.bank.capacitor_costs, initial=np.inf))
 
     @cached_property
     def ordered(self) -> bool:

@@ -12,10 +12,10 @@ from selector.candidate import Operating, Pairing
 from selector.candidate.figures import NO_RESISTOR, ResistorFigures
 from selector.candidate.operating import Border, FilterAt
 from selector.candidate.uses import power_w, use_headroom
-from selector.limits import FilterCheck, LinkCheck, Measure, RangeCheck, use_of, worst_point
-from selector.limits.measure import Check
+from selector.limits import Measure, use_of, worst_point
 from selector.search.bench import Bench
 from selector.search.cells import ROOM, Cells
+from selector.search.checks import met
 from selector.search.interval import Interval, lower, upper
 from selector.search.lots import Lot
 from selector.search.reach import least_larger
@@ -95,7 +95,9 @@ class Frames:
         if self.stand_in is not None:
             at = replace(at, filter=self.stand_in)
         at = zeroed(at)
-        stands = self._standing(at, stands, last=last)
+        stands = met(self.bench.last_checks if last else self.bench.inner_checks, at, stands, possible)
+        if self.stand_in is not None:
+            stands = met(self.bench.filter_checks, at, stands, possible)
         return Block(at, stands, low_ends(combined(at)) if self.bench.needs_filter else None)
 
     def _given(self, gain: Interval) -> tuple[ResistorFigures, Interval, Truths]:
@@ -114,20 +116,6 @@ class Frames:
         near = Interval(np.asarray(cut.low) * (1.0 - ROOM), np.asarray(cut.high) * (1.0 + ROOM))
         finer, reaches = _cut(reached, near)
         return switched, finer, stands & reaches
-
-    def _standing(self, at: Operating, stands: Truths, *, last: bool) -> Truths:
-        """Return which cells could meet the held limits that concern a range by itself."""
-        for limit in self.bench.limits:
-            for check in limit.checks:
-                if isinstance(check, RangeCheck):
-                    measure = check.measure(at) if last or not check.last_only else None
-                else:
-                    measure = self._filtered(check, at)
-                stands = stands if measure is None else stands & possible(measure)
-        return stands
-
-    def _filtered(self, check: Check, at: Operating) -> Measure | None:
-        return check.measure(at) if isinstance(check, FilterCheck) and self.stand_in is not None else None
 
 
 def _cut(cells: Interval, reach: Interval) -> tuple[Interval, Truths]:
@@ -192,12 +180,7 @@ def _reached_last(bench: Bench, block: Block, reached: Numbers, cells: Cells) ->
 
 def _linked(bench: Bench, at: Operating) -> Truths:
     """Return where the held limits on neighbours can be met."""
-    stands: Truths = np.ones((1, 1), dtype=bool)
-    for limit in bench.limits:
-        for check in limit.checks:
-            measure = check.measure(at) if isinstance(check, LinkCheck) else None
-            stands = stands if measure is None else stands & possible(measure)
-    return stands
+    return met(bench.link_checks, at, np.ones((1, 1), dtype=bool), possible)
 
 
 def _use(bench: Bench, at: Operating, error: Combined | None, low_a: Numbers | float, high_a: Numbers) -> Numbers:

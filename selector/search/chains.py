@@ -83,12 +83,11 @@ class Chains:
 
     def _within(self, last: int, most: float, cost_most: float) -> bool:
         """Return whether a chain to a last range up to a figure costs at most `cost_most`."""
-        with np.errstate(all="ignore"):
-            graph = self._links.graph(last, most)
-        alone = self._cost((last,), 0) if self._inner is None else self._links.last_costs[last]
+        alone = self._links.last_costs[last]
         if self._inner is None:
             return bool(alone <= cost_most)
-        costs = self._links.inner_costs + graph.rest[0]
+        with np.errstate(all="ignore"):
+            costs = self._links.inner_costs + self._links.graph(last, most).rest[0]
         return bool(costs.min(initial=inf) + alone <= cost_most)
 
     def _walk(self, graphs: list[Graph], floor: float, cost_most: float) -> Iterator[Path]:
@@ -101,16 +100,9 @@ class Chains:
             if len(chain) <= self._depth:
                 self._extend(heap, graph, number, chain, cost_most)
                 continue
-            if self._wanted(chain):
-                figure = self._figure(chain)
-                if floor < figure:
-                    yield Path(figure, self._places(chain))
-
-    def _wanted(self, chain: tuple[int, ...]) -> bool:
-        """Return whether a chain holds what its lane asks of it."""
-        lane, places = self._lane, self._places(chain)
-        cost = sum(self._cost(chain, place) for place in range(len(chain)))
-        return (lane.needed == NONE or lane.needed in places) and cost > lane.cost_above
+            figure = self._figure(chain)
+            if floor < figure:
+                yield Path(figure, self._places(chain))
 
     def _may_hold(self, chain: tuple[int, ...], graph: Graph) -> bool:
         """Return whether a chain, or a longer one, may hold the resistor that its lane needs."""
@@ -119,9 +111,6 @@ class Chains:
             return True
         places = [self._switched(chain, place) for place in range(len(chain))]
         return needed in places or needed == int(self._last.switched[0, graph.last])
-
-    def _cost_of_last(self, last: int) -> float:
-        return float(self._links.last_costs[last])
 
     def _places(self, chain: tuple[int, ...]) -> tuple[int, ...]:
         inner = () if self._inner is None else tuple(int(self._inner.switched[0, one]) for one in chain[:-1])
@@ -148,7 +137,7 @@ class Chains:
             rest, dear = graph.rest[depth][allowed], graph.dear[depth][allowed]
         before_ = sum(self._cost(chain, place) for place in range(depth))
         names = tuple(self._name(chain, place) for place in range(depth))
-        ending = 0.0 if depth == self._depth else self._cost_of_last(graph.last)
+        ending = 0.0 if depth == self._depth else float(self._links.last_costs[graph.last])
         for following, left, most in zip(longer, rest, dear, strict=True):
             whole = (*chain, following)
             so_far = before_ + self._cost(whole, depth) + ending

@@ -6,7 +6,9 @@ from collections.abc import Iterator
 from dataclasses import dataclass, replace
 from math import inf, isfinite
 
-from selector.candidate.design import cost_or_inf, in_stock
+import numpy as np
+
+from selector.candidate.design import in_stock
 from selector.search.bench import Bench
 from selector.search.ladder import Ladder
 from selector.search.lots import NONE
@@ -63,7 +65,7 @@ class Doubts:
 
     def of_single(self, step: int, switched: int) -> bool:
         """Return whether a design with one range might take another filter."""
-        cost = 0.0 if switched == NONE else self.copies * cost_or_inf(self.bench.resistors.parts[switched])
+        cost = 0.0 if switched == NONE else self.copies * float(self.bench.resistors.costs[switched])
         dear = isfinite(self.spare) and cost > self.spare - self._cost(step)
         return self.whole or self._short(step, self.common) or self._short(step, switched) or dear
 
@@ -85,4 +87,4 @@ class Doubts:
         return float(self.bench.bank.resistor_costs[place] + self.bench.bank.capacitor_costs[place])
 
     def _dearest(self) -> float:
-        return self.copies * self.places * max((cost_or_inf(part) for part in self.bench.shelf.resistors), default=0.0)
+        return self.copies * self.places * float(np.max(self.bench.resistors.costs, initial=0.0))

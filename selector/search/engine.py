@@ -15,6 +15,7 @@ from selector.search.bench import Bench
 from selector.search.chains import Chains, Path
 from selector.search.order import NEARLY, rounded
 from selector.search.piece import Piece, Stage
+from selector.search.prices import gain_budget
 from selector.search.queue import Queue
 from selector.search.stages import Stages
 from selector.search.standing import PairKey, Standing
@@ -65,7 +66,7 @@ class Engine:
     def _look(self, stages: Stages, piece: Piece) -> None:
         """Judge the chains of a row: first those of its least figure, in their order, then further ones by steps."""
         line, solved = stages.solved(piece)
-        cost_most = stages.cost_left(piece)
+        cost_most = gain_budget(self._bench, line, piece.lane.cost_most)
         chains = Chains(self._bench, line, solved, piece.lane, stages.fixed_cost(piece))
         least, floor = float(solved.least[0]), -inf
         if cost_most < inf:
@@ -91,10 +92,10 @@ class Engine:
 
     def _judge(self, stages: Stages, piece: Piece, path: Path) -> bool:
         """Judge a chain in full and place it; return whether it was placed or could not have been the better one."""
-        design = stages.design(piece, path.switched)
         if self._hopeless(piece, path.figure):
             return not piece.doubtful
         self._bench.counts[EVALUATED] += 1
+        design = stages.design(piece, path.switched)
         chain = stopped_at(chain_of(self._bench.conditions, design), self._bench.bank, self._bench.lifted)
         if isinstance(chain, str):
             return False

@@ -14,8 +14,10 @@ from selector.candidate.operating import FilterAt
 from selector.limits import LIMITS, FilterCheck
 from selector.physics.filters import corner_hz
 from selector.search.bank import FilterBank
+from selector.search.checks import checks_of, met
 from selector.search.interval import Interval
 from selector.search.stacks import Indices, taken
+from selector.search.stretches import first_place
 
 Numbers = NDArray[np.float64]
 Truths = NDArray[np.bool_]
@@ -32,7 +34,7 @@ class Ladder:
     """
 
     bank: FilterBank
-    lifted: frozenset[str]
+    checks: tuple[FilterCheck, ...]  # that thin the choice
     places: Indices
     filters: FilterAt
     least: FilterAt
@@ -52,10 +54,15 @@ class Ladder:
             raise ValueError(message)
         return taken(self.bank.figures, self.places[step])
 
+    @property
+    def _ends(self) -> tuple[FilterAt, FilterAt]:
+        """Return the least and the most of each figure over all filters."""
+        first = np.array(0)
+        return taken(self.least, first), taken(self.most, first)
+
     def stand_in(self, *, alone: bool) -> FilterAt:
         """Return an interval of all filters; `alone` where no network adds to their resistance."""
-        first, last = np.array(0), np.array(0)
-        low, high = taken(self.least, first), taken(self.most, last)
+        low, high = self._ends
         slow, noisy = low.slow_hz, low.noisy_hz
         if not alone:
             slow, noisy = self.slowest_hz, self.slowest_hz * self.spread
@@ -77,27 +84,22 @@ class Ladder:
         `len(self)` where none serves. A filter with a faster corner serves whatever a slower one does.
         """
         shape = np.broadcast(np.asarray(at.gain), np.asarray(at.high_a)).shape
-        low, high = np.zeros(shape, dtype=np.int64), np.full(shape, len(self), dtype=np.int64)
-        while np.any(low < high):
-            middle = np.minimum((low + high) // 2, len(self) - 1)
-            serves = thinned(replace(at, filter=taken(self.filters, middle)), self.lifted)
-            open_ = low < high
-            high = np.where(open_ & serves, middle, high)
-            low = np.where(open_ & ~serves, middle + 1, low)
-        return low
+
+        def serves(step: Indices) -> Truths:
+            return thinned(replace(at, filter=taken(self.filters, step)), self.checks)
+
+        return first_place(np.full(shape, len(self)), serves, len(self) - 1)
 
     def own(self, at: Operating) -> FilterAt:
         """Return what no filter that serves a range by itself can beat, where a network adds to its resistance."""
         shape = np.broadcast(np.asarray(at.gain), np.asarray(at.high_a)).shape
-        most = taken(self.most, np.array(0))
-        slow = np.full(shape, self.slowest_hz)
-        fast = np.full(shape, float(np.asarray(most.slow_hz)))
-        ohm, least_ohm = float(np.asarray(taken(self.least, np.array(0)).ohm)), float(np.asarray(most.least_ohm))
+        low, high = self._ends
+        slow, fast = np.full(shape, self.slowest_hz), np.full(shape, high.slow_hz)
         for _ in range(HALVINGS):
             middle = np.sqrt(slow * fast)
-            serves = thinned(replace(at, filter=FilterAt(ohm, middle, middle, least_ohm)), self.lifted)
+            serves = thinned(replace(at, filter=FilterAt(low.ohm, middle, middle, high.least_ohm)), self.checks)
             fast, slow = np.where(serves, middle, fast), np.where(serves, slow, middle)
-        return FilterAt(ohm, float(np.asarray(most.slow_hz)), slow * self.spread, least_ohm)
+        return FilterAt(low.ohm, high.slow_hz, slow * self.spread, high.least_ohm)
 
     def choices(self, first: Operating, lasts: Operating) -> Indices:
         """Return the step of the filter that a lowest range takes beside each of several last ones.
@@ -108,7 +110,7 @@ class Ladder:
         """
         steps = np.arange(len(self))
         figures = self.figures(steps)
-        serves = np.broadcast_to(thinned(first.with_filter(figures), self.lifted), (1, len(self))).ravel()
+        serves = np.broadcast_to(thinned(first.with_filter(figures), self.checks), (1, len(self))).ravel()
         farad = np.asarray(figures.farad * (1.0 + figures.farad_tolerance_frac))
         ohm = np.asarray(figures.ohm * (1.0 + figures.tolerance_frac))
         steps = _foremost(steps[serves], farad[serves], (ohm * farad)[serves])
@@ -129,15 +131,9 @@ def _foremost(steps: Indices, first: Numbers, second: Numbers) -> Indices:
     return steps[order[second[order] >= reached * (1.0 - 1e-11)]]
 
 
-def thinned(at: Operating, lifted: frozenset[str]) -> Truths:
-    """Return which ranges are served by the filter that is in, by the held limits that thin the choice."""
-    serves: Truths = np.ones((), dtype=bool)
-    for limit in LIMITS:
-        if limit.thins and limit.name not in lifted:
-            for check in limit.checks:
-                measure = check.measure(at) if isinstance(check, FilterCheck) else None
-                serves = serves if measure is None else serves & np.asarray(measure.meets, dtype=bool)
-    return serves
+def thinned(at: Operating, checks: tuple[FilterCheck, ...]) -> Truths:
+    """Return which ranges are served by the filter that is in."""
+    return met(checks, at, np.ones((), dtype=bool))
 
 
 def ladder_of(bank: FilterBank, pairing: Pairing, lifted: frozenset[str]) -> Ladder | None:
@@ -145,25 +141,25 @@ def ladder_of(bank: FilterBank, pairing: Pairing, lifted: frozenset[str]) -> Lad
     if bank.figures is None:
         return None
     at = _fastest(pairing)
+    checks = checks_of((limit for limit in LIMITS if limit.thins and limit.name not in lifted), FilterCheck)
     filtered = at.with_filter(bank.figures)
-    serves = np.broadcast_to(thinned(filtered, lifted), (len(bank),))
-    if not serves.any():
+    serving = np.flatnonzero(np.broadcast_to(thinned(filtered, checks), (len(bank),)))
+    if not len(serving):
         return None
-    filters = taken(_flat(filtered.filter, len(bank)), np.flatnonzero(serves))
-    order = _order(bank, np.flatnonzero(serves), filters)
-    filters = taken(filters, order)
-    figures = taken(bank.figures, np.flatnonzero(serves)[order])
-    spread = float(np.min((1.0 + figures.farad_tolerance_frac) / (1.0 - figures.farad_tolerance_frac)))
+    filters = taken(_flat(filtered.filter, len(bank)), serving)
+    order = _order(bank, serving, filters)
+    places, filters = serving[order], taken(filters, order)
+    spread_frac = np.asarray(taken(bank.figures, places).farad_tolerance_frac)
     return Ladder(
         bank,
-        lifted,
-        np.flatnonzero(serves)[order],
+        checks,
+        places,
         filters,
         FilterAt(*(_from(one, np.minimum) for one in _fields(filters))),
         FilterAt(*(_from(one, np.maximum) for one in _fields(filters))),
-        _slowest(at, filters, lifted),
-        spread,
-        np.argsort(_order(bank, np.flatnonzero(serves)[order], replace(filters, slow_hz=np.ones(len(order))))),
+        _slowest(at, filters, checks),
+        float(np.min((1.0 + spread_frac) / (1.0 - spread_frac))),
+        np.argsort(_order(bank, places, replace(filters, slow_hz=np.ones(len(places))))),
     )
 
 
@@ -175,14 +171,14 @@ def _fastest(pairing: Pairing) -> Operating:
     return at.operate_at(1.0, NO_RESISTOR, NO_RESISTOR, last=True)
 
 
-def _slowest(at: Operating, filters: FilterAt, lifted: frozenset[str]) -> float:
+def _slowest(at: Operating, filters: FilterAt, checks: tuple[FilterCheck, ...]) -> float:
     """Return a corner just below the slowest that serves."""
     slow, fast = 0.0, float(np.min(np.asarray(filters.slow_hz)))
     most = float(np.max(np.asarray(filters.least_ohm)))
     least = float(np.min(np.asarray(filters.ohm)))
     for _ in range(60):
         middle = 0.5 * (slow + fast)
-        if thinned(replace(at, filter=FilterAt(least, middle, middle, most)), lifted):
+        if thinned(replace(at, filter=FilterAt(least, middle, middle, most)), checks):
             fast = middle
         else:
             slow = middle

@@ -15,6 +15,7 @@ from selector.search.reach import before
 from selector.search.rows import Ranges, use_between
 from selector.search.solve import Solved
 from selector.search.stacks import Indices
+from selector.search.stretches import first_place
 
 Numbers = NDArray[np.float64]
 Truths = NDArray[np.bool_]
@@ -107,14 +108,12 @@ class Links:
         """Return for each inner range the first of its row that it may follow."""
         if self._inner is None:
             return self._ends
-        low, high = np.zeros_like(self._ends), self._ends.copy()
-        while np.any(low < high):
-            middle = np.minimum((low + high) // 2, len(self._ends) - 1)
-            stands = up_to(self.figures(last, self._inner_uses(middle)), most)
-            open_ = low < high
-            high = np.where(open_ & stands, middle, high)
-            low = np.where(open_ & ~stands, middle + 1, low)
-        return np.where(self._inner.stands[0], low, self._ends)
+
+        def follows(below: Indices) -> Truths:
+            return up_to(self.figures(last, self._inner_uses(below)), most)
+
+        begins = first_place(self._ends, follows, len(self._ends) - 1)
+        return np.where(self._inner.stands[0], begins, self._ends)
 
     def _inner_uses(self, below: Indices) -> Numbers:
         """Return the use of each inner range above the one that `below` names for it."""

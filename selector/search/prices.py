@@ -31,21 +31,28 @@ def spare_of(bench: Bench, line: Line) -> Numbers:
         each = [ceil(lot.range_count / part.channels) * cost_or_inf(part) for part in bench.shelf.switches]
         fixed = fixed + np.array(each)[lot.switch]
     if lot.family.law.common_name is not None:
-        fixed = fixed + lot.family.law.copies * _costs(bench)[line.common]
+        fixed = fixed + lot.family.law.copies * bench.resistors.costs[line.common]
     return np.asarray(limit - fixed)
+
+
+def gain_budget_of(bench: Bench, line: Line) -> Numbers:
+    """Return what gain resistors may cost beside the cheapest filter, of shape (rows,), with room for rounding."""
+    spare = spare_of(bench, line)
+    if np.isposinf(spare).all():
+        return spare
+    return spare - bench.cheapest_filter + ROUNDING * (1.0 + bench.conditions.cost_limit)
+
+
+def gain_budget(bench: Bench, line: Line, most: float) -> float:
+    """Return what the gain resistors of a single row may cost, `most` where that is less."""
+    return min(float(gain_budget_of(bench, line)[0]), most + ROUNDING * (1.0 + bench.conditions.cost_limit))
 
 
 def payable(bench: Bench, line: Line) -> NDArray[np.bool_] | None:
     """Return which switched resistors rows can pay beside the cheapest others, (rows, resistors); None for any."""
-    spare, law = spare_of(bench, line), line.lot.family.law
-    if law.switched_name is None or np.isposinf(spare).all():
+    budget, law = gain_budget_of(bench, line), line.lot.family.law
+    if law.switched_name is None or np.isposinf(budget).all():
         return None
-    costs = law.copies * _costs(bench)
-    pairs = bench.bank.resistor_costs + bench.bank.capacitor_costs
+    costs = law.copies * bench.resistors.costs
     others = (line.lot.range_count - 1) * costs.min(initial=inf) if line.lot.range_count > 1 else 0.0
-    left = spare - others - pairs.min(initial=inf) + ROUNDING * (1.0 + bench.conditions.cost_limit)
-    return np.asarray(costs[None, :] <= left[:, None])
-
-
-def _costs(bench: Bench) -> Numbers:
-    return np.array([cost_or_inf(part) for part in bench.resistors.parts])
+    return np.asarray(costs[None, :] <= (budget - others)[:, None])

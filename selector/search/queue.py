@@ -19,6 +19,7 @@ AT_ONCE = {
     Stage.LANE: 24,
     Stage.CHAINS: 1,
 }
+_ORDER = {stage: place for place, stage in enumerate(Stage)}
 Sort = tuple[Stage, int, int, bool]
 
 
@@ -51,7 +52,7 @@ class Queue:
         while True:
             sort = min(
                 (sort for sort, heap in self._heaps.items() if heap),
-                key=lambda one: (self._heaps[one][0][0], -list(Stage).index(one[0])),
+                key=lambda one: (self._heaps[one][0][0], -_ORDER[one[0]]),
                 default=None,
             )
             if sort is None:

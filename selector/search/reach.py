@@ -11,6 +11,7 @@ from numpy.typing import NDArray
 from selector.search.bench import Bench
 from selector.search.rows import Ranges, use_between
 from selector.search.stacks import Indices
+from selector.search.stretches import doubled, least_between
 
 Numbers = NDArray[np.float64]
 
@@ -70,13 +71,13 @@ def least_larger(reached: Numbers, end: Indices, use_from: Callable[[Indices], N
     span. The least of their maximum is found by halving.
     """
     rows = np.arange(len(end))[:, None]
-    table, last = _doubled(reached), reached.shape[1] - 1
+    table, last = doubled(reached), reached.shape[1] - 1
     low, high = np.zeros_like(end), end.copy()
     best = np.full(end.shape, np.inf)
     open_ = low < high
     while open_.any():
         middle = np.minimum((low + high) // 2, last)
-        reach = _least(table, rows, middle, np.maximum(end, middle + 1))
+        reach = least_between(table, middle, np.maximum(end, middle + 1), rows)
         use = use_from(middle)
         best = np.where(open_, np.minimum(best, np.maximum(reach, use)), best)
         rises = reach >= use
@@ -84,20 +85,3 @@ def least_larger(reached: Numbers, end: Indices, use_from: Callable[[Indices], N
         low = np.where(open_ & ~rises, middle + 1, low)
         open_ = low < high
     return best
-
-
-def _doubled(values: Numbers) -> Numbers:
-    """Return the least of 1, 2, 4 … neighbours from each place on, of shape (levels, rows, columns)."""
-    table = [values]
-    width = 1
-    while 2 * width <= values.shape[1]:
-        one = np.full(values.shape, np.inf)
-        one[:, : values.shape[1] - width] = np.minimum(table[-1][:, :-width], table[-1][:, width:])
-        table.append(one)
-        width *= 2
-    return np.stack(table)
-
-
-def _least(table: Numbers, rows: Indices, begin: Indices, end: Indices) -> Numbers:
-    level = np.frexp((end - begin).astype(float))[1] - 1
-    return np.asarray(np.minimum(table[level, rows, begin], table[level, rows, end - (1 << level)]))

@@ -9,10 +9,12 @@ from functools import cached_property
 import numpy as np
 from numpy.typing import NDArray
 
+from selector.candidate.design import cost_or_inf
 from selector.candidate.figures import ResistorFigures, resistor_figures
 from selector.parts import Resistor
 from selector.search.interval import Interval
 from selector.search.stacks import Indices, stacked
+from selector.search.stretches import doubled, least_between
 
 Numbers = NDArray[np.float64]
 NEAR = 1e-9  # how far a resistance worked out of a gain may be off, relative
@@ -42,14 +44,19 @@ class Resistors:
         return {part.part: place for place, part in enumerate(self.parts)}
 
     @cached_property
+    def costs(self) -> Numbers:
+        """Return the cost of each, infinite where none is stated."""
+        return np.array([cost_or_inf(part) for part in self.parts])
+
+    @cached_property
     def whole(self) -> ResistorFigures:
         """Return what all resistors have between them, as intervals."""
         return self.between(np.array([0]), np.array([len(self)]))
 
     @cached_property
-    def _least(self) -> tuple[list[Numbers], list[Numbers]]:
+    def _least(self) -> tuple[Numbers, Numbers]:
         """Return the least tolerance and drift of every stretch of 1, 2, 4 … resistors."""
-        return _doubled(np.asarray(self.figures.tolerance_frac)), _doubled(np.asarray(self.figures.tempco_per_k))
+        return doubled(np.asarray(self.figures.tolerance_frac)), doubled(np.asarray(self.figures.tempco_per_k))
 
     @cached_property
     def _most(self) -> tuple[float, float]:
@@ -99,25 +106,3 @@ def resistors_of(parts: Sequence[Resistor], temperature_change_k: float) -> Resi
     each = [resistor_figures(part) for part in rising]
     figures = stacked(each) if each else ResistorFigures(*[np.empty(0)] * 3)
     return Resistors(rising, figures, temperature_change_k)
-
-
-def _doubled(values: Numbers) -> list[Numbers]:
-    table = [values]
-    width = 1
-    while 2 * width <= len(values):
-        table.append(np.minimum(table[-1][:-width], table[-1][width:]))
-        width *= 2
-    return table
-
-
-def least_between(table: list[Numbers], begin: Indices, end: Indices) -> Numbers:
-    """Return the least of values[begin:end], element by element, from the least of stretches of 1, 2, 4 …."""
-    size = end - begin
-    level = np.frexp(size.astype(float))[1] - 1
-    least = np.empty(np.broadcast(begin, end).shape)
-    for one in set(level.ravel().tolist()):
-        here = level == one
-        first = np.broadcast_to(begin, least.shape)[here]
-        last = np.broadcast_to(end, least.shape)[here] - (1 << one)
-        least[here] = np.minimum(table[one][first], table[one][last])
-    return least

@@ -12,8 +12,9 @@ from selector.candidate import Operating, Pairing
 from selector.candidate.figures import NO_RESISTOR
 from selector.candidate.operating import FilterAt
 from selector.candidate.uses import power_w, use_headroom
-from selector.limits import FilterCheck, LinkCheck, RangeCheck, use_of, worst_point
+from selector.limits import use_of, worst_point
 from selector.search.bench import Bench
+from selector.search.checks import met
 from selector.search.lots import NONE, Lot
 from selector.search.stacks import Indices, mapped, taken
 
@@ -85,8 +86,8 @@ def ranges_of(bench: Bench, line: Line, usable: Truths, *, last: bool) -> Ranges
         places = np.arange(len(bench.resistors))[None, :]
     at = line.ranges(bench, pairing, places, last=last)
     stands = _standing(bench, at, np.broadcast_to(usable, (len(line.lot), places.shape[1])), last=last)
-    falling = np.asarray(at.gain)[0, 0] > np.asarray(at.gain)[0, -1]
-    switched, inside = _windows(stands, rising=bool(falling))
+    borders_rise = np.asarray(at.gain)[0, 0] > np.asarray(at.gain)[0, -1]
+    switched, inside = _windows(stands, rising=bool(borders_rise))
     if pairing.amplifier.law.switched_name is None:
         switched = np.full(switched.shape, NONE)
     at = zeroed(line.ranges(bench, pairing, switched, last=last))
@@ -94,11 +95,7 @@ def ranges_of(bench: Bench, line: Line, usable: Truths, *, last: bool) -> Ranges
 
 
 def _standing(bench: Bench, at: Operating, stands: Truths, *, last: bool) -> Truths:
-    for limit in bench.limits:
-        for check in limit.checks:
-            if isinstance(check, RangeCheck) and (last or not check.last_only):
-                measure = check.measure(at)
-                stands = stands if measure is None else stands & measure.meets
+    stands = met(bench.last_checks if last else bench.inner_checks, at, stands)
     if not last and bench.ordered:
         conditions = bench.conditions
         stands = stands & (at.high_a > conditions.current_min_a) & (at.high_a < conditions.current_max_a)
@@ -127,22 +124,13 @@ def with_filter(bench: Bench, ranges: Ranges, filters: FilterAt | None) -> Range
     if filters is None:
         return ranges
     at = replace(ranges.at, filter=filters)
-    stands = ranges.stands
-    for limit in bench.limits:
-        for check in limit.checks:
-            measure = check.measure(at) if isinstance(check, FilterCheck) else None
-            stands = stands if measure is None else stands & measure.meets
-    return Ranges(ranges.switched, at, stands, combined(at))
+    return Ranges(ranges.switched, at, met(bench.filter_checks, at, ranges.stands), combined(at))
 
 
 def use_between(bench: Bench, at: Operating, error: Combined | None, shape: tuple[int, ...]) -> Numbers:
     """Return the use of the allowed error of ranges whose borders are in, infinite where a held limit is not met."""
-    stands: Truths = np.ones(shape, dtype=bool)
+    stands = met(bench.link_checks, at, np.ones(shape, dtype=bool))
     use: Numbers = np.zeros(shape)
-    for limit in bench.limits:
-        for check in limit.checks:
-            measure = check.measure(at) if isinstance(check, LinkCheck) else None
-            stands = stands if measure is None else stands & measure.meets
     if error is not None:
         point = worst_point(at, error)
         use = use + use_of(point)

@@ -16,6 +16,7 @@ from selector.limits import AmplifierCheck, DesignCheck, Limit, Measure, PairChe
 from selector.limits.measure import DesignAt
 from selector.parts import Amplifier, Capacitor, Resistor
 from selector.search.bench import Bench
+from selector.search.checks import checks_of
 from selector.search.lots import Family, Stock
 from selector.search.rows import Line
 from selector.search.stacks import Indices, columns, taken
@@ -27,7 +28,7 @@ FREE = Resistor.model_construct(part="", resistance=1.0, tolerance=0.0, tempco=0
 
 def cheapest(bench: Bench) -> tuple[Resistor, Capacitor | None]:
     """Return stand-ins for any resistor and capacitor that cost as much as the cheapest, of which there is plenty."""
-    resistors = min((cost_or_inf(part) for part in bench.shelf.resistors), default=inf)
+    resistors = float(np.min(bench.resistors.costs, initial=inf))
     capacitor = min(bench.shelf.capacitors, key=cost_or_inf, default=None)
     plenty = {"quantity": PLENTY, "generic": False}
     resistor = FREE.model_copy(update={"unit_cost": resistors if isfinite(resistors) else None})
@@ -132,5 +133,5 @@ def _plenty(line: Line) -> Amplifier:
 def design_stands(bench: Bench, design: Design) -> bool:
     """Return whether a design meets the held limits on whole designs."""
     at = DesignAt(bench.conditions, design)
-    checks = (check for limit in bench.limits for check in limit.checks if isinstance(check, DesignCheck))
-    return all(measure is None or bool(measure.meets) for measure in (check.measure(at) for check in checks))
+    measures = (check.measure(at) for check in checks_of(bench.limits, DesignCheck))
+    return all(measure is None or bool(measure.meets) for measure in measures)

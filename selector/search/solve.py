@@ -79,14 +79,15 @@ def solve(bench: Bench, line: Line, lanes: list[Lane]) -> Solved:
         for _ in range(line.lot.range_count - 2):
             reached.append(reached_above(bench, Below.of(inner, reached[-1]), inner, end))
         use = reached_above(bench, Below.of(inner, reached[-1]), last, below_last(bench, inner, last))
-        spent = Spent.of(bench, last)
-        figure = _known(spent.figures(bench, use))
+        spent, figure = _figures(bench, last, use)
     return Solved(inner, last, tuple(reached), use, spent, figure, figure.min(axis=1), steps)
 
 
-def _known(figure: Numbers) -> Numbers:
-    """Return figures in which what cannot be worked out is out."""
-    return np.where(np.isnan(figure), np.inf, figure)
+def _figures(bench: Bench, last: Ranges, use: Numbers) -> tuple[Spent, Numbers]:
+    """Return what last ranges spend, and the figures of combinations; what cannot be worked out is out."""
+    spent = Spent.of(bench, last)
+    figure = spent.figures(bench, use)
+    return spent, np.where(np.isnan(figure), np.inf, figure)
 
 
 def _single(bench: Bench, line: Line, lanes: list[Lane], last: Ranges) -> Solved:
@@ -103,8 +104,7 @@ def _single(bench: Bench, line: Line, lanes: list[Lane], last: Ranges) -> Solved
             last = Ranges(last.switched, last.at, last.stands & (steps < len(ladder)))
     last = with_filter(bench, last, filters)
     use = first_use(bench, last)
-    spent = Spent.of(bench, last)
-    figure = _known(spent.figures(bench, use))
+    spent, figure = _figures(bench, last, use)
     return Solved(None, last, (), use, spent, figure, figure.min(axis=1), steps)
 
 
@@ -152,12 +152,9 @@ def _narrowed(usable: Truths, each: list[Truths | None]) -> Truths:
 def _allowed(each: list[Truths | None], ranges: Ranges) -> Truths:
     if all(one is None for one in each):
         return ranges.stands
-    rows = [np.ones(0, dtype=bool) if one is None else one for one in each]
-    taken = [
-        np.ones(ranges.shape[1], dtype=bool) if not len(one) else one[ranges.switched[row]]
-        for row, one in enumerate(rows)
-    ]
-    return np.asarray(ranges.stands & np.stack(taken))
+    every = np.ones(ranges.shape[1], dtype=bool)
+    rows = [every if one is None else one[ranges.switched[row]] for row, one in enumerate(each)]
+    return np.asarray(ranges.stands & np.stack(rows))
 
 
 def _of_each(lanes: list[Lane], last: Ranges) -> Indices:

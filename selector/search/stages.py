@@ -32,7 +32,6 @@ Most = Callable[[PairKey], float]
 COARSE = (10, 8)
 FINE = (40, 24)
 SINGLE = (1, 64)  # with one range, whose gain alone decides
-ROUNDING = 1e-9  # of sums of costs
 PARTS = (32, 8, 1)  # most common resistors in a block, level by level
 
 
@@ -210,15 +209,6 @@ class Stages:
         """Return the row of a piece, solved by itself."""
         line = self.line([piece])
         return line, solve(self._bench, line, [piece.lane])
-
-    def cost_left(self, piece: Piece) -> float:
-        """Return what is left of the cost limit for gain resistors, infinite where there is none."""
-        bench, limit = self._bench, self._bench.conditions.cost_limit
-        if limit == inf or "cost" in bench.lifted:
-            return inf
-        fixed = stated(cost_of(self._bare(piece)), inf)
-        cheapest = float(np.min(bench.bank.resistor_costs + bench.bank.capacitor_costs))
-        return min(limit - fixed - cheapest, piece.lane.cost_most) + ROUNDING * (1.0 + limit)
 
     def fixed_cost(self, piece: Piece) -> float:
         """Return the cost of all parts of a piece but its gain resistors, UNKNOWN where one states none."""
