@@ -31,6 +31,14 @@ STATED = {
     "sense__lead": 1e-3,
     "accuracy__calibration_uncertainty": 1e-3,
 }
+LIMITED: dict[str, Any] = STATED | {
+    "converter__input_max": 4.0,
+    "converter__clamp_current": 1e-3,
+    "signal__settle": 1e-3,
+    "accuracy__reading": None,
+    "accuracy__floor": None,
+    "accuracy__bands": [{"up_to": 0.3, "reading": 0.1, "floor": 0.01}, {"reading": 0.05}],
+}
 
 
 def design_of(law: str, number: int) -> Design:

@@ -10,7 +10,7 @@ import pytest
 from selector.budget import combined
 from selector.candidate import ShuntAt
 from selector.limits import LIMITS, FilterCheck, LinkCheck, PairCheck, PointCheck, RangeCheck, ShuntCheck
-from tests.budget.two_designs import STATED, design_of
+from tests.budget.two_designs import LIMITED, design_of
 from tests.builders import HIGH_SIDE, OF_LAW, ZERO, chain, near, side_by_side
 
 if TYPE_CHECKING:
@@ -18,16 +18,7 @@ if TYPE_CHECKING:
     from selector.limits import Measure
 
 OF_A_RANGE = (RangeCheck, LinkCheck, FilterCheck)
-ASKED = STATED | {
-    "current__overload": 3.0,
-    "current__overload_time": 0.01,
-    "converter__input_max": 4.0,
-    "converter__clamp_current": 1e-3,
-    "signal__settle": 1e-3,
-    "accuracy__reading": None,
-    "accuracy__floor": None,
-    "accuracy__bands": [{"up_to": 0.3, "reading": 0.1, "floor": 0.01}, {"reading": 0.05}],
-}
+ASKED = LIMITED | {"current__overload": 3.0, "current__overload_time": 0.01}
 
 
 def _measures(check: object, first: Chain, second: Chain | None = None) -> list[Measure | None]:

@@ -13,7 +13,7 @@ from selector.candidate import Calibration
 from selector.candidate.figures import ResistorFigures, SwitchFigures
 from selector.candidate.operating import Border, FilterAt
 from selector.search.interval import Interval, lower, upper
-from tests.budget.two_designs import STATED, design_of
+from tests.budget.two_designs import LIMITED, design_of
 from tests.builders import HIGH_SIDE, OHMS_OF_LAW, ZERO, chain
 
 if TYPE_CHECKING:
@@ -34,14 +34,6 @@ SIDES: dict[str, dict[str, object]] = {
     "high side": HIGH_SIDE,
     "high side both ways": HIGH_SIDE | ZERO | {"current__two_way": True},
 }
-ASKED: dict[str, object] = STATED | {
-    "converter__input_max": 4.0,
-    "converter__clamp_current": 1e-3,
-    "signal__settle": 1e-3,
-    "accuracy__reading": None,
-    "accuracy__floor": None,
-    "accuracy__bands": [{"up_to": 0.3, "reading": 0.1, "floor": 0.01}, {"reading": 0.05}],
-}
 Tree = TypeVar("Tree")
 
 
@@ -61,7 +53,7 @@ class Boxed:
 
 @cache
 def _pairing(law: str, side: str, number: int) -> Pairing:
-    return chain(design_of(law, number), **ASKED | SIDES[side]).pairing
+    return chain(design_of(law, number), **LIMITED | SIDES[side]).pairing
 
 
 @cache
